@@ -1,0 +1,49 @@
+import react from "@vitejs/plugin-react";
+import { fileURLToPath } from "node:url";
+import { defineConfig } from "vitest/config";
+
+const root = fileURLToPath(new URL("./", import.meta.url));
+
+const alias = [
+  { find: /^@\//, replacement: root },
+  // The marker package throws outside a server bundle; tests run the server's code in plain Node.
+  { find: /^server-only$/, replacement: `${root}tests/server-only.ts` },
+];
+
+export default defineConfig({
+  resolve: { alias },
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: { name: "reference", environment: "node", include: ["tests/reference/**/*.test.ts"] },
+      },
+      {
+        extends: true,
+        test: { name: "unit", environment: "node", include: ["tests/unit/**/*.test.ts"] },
+      },
+      {
+        extends: true,
+        plugins: [react()],
+        test: {
+          name: "component",
+          environment: "jsdom",
+          include: ["tests/component/**/*.test.tsx"],
+          setupFiles: ["tests/component/setup.ts"],
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: "integration",
+          environment: "node",
+          include: ["tests/integration/**/*.test.ts"],
+          setupFiles: ["tests/integration/setup.ts"],
+          pool: "forks",
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
+        },
+      },
+    ],
+  },
+});
