@@ -1,0 +1,17 @@
+export { ageText } from "./age-text";
+export { calendarDate } from "./calendar-date";
+export { cmFromFeetInches } from "./cm-from-feet-inches";
+export { dayAndDate } from "./day-and-date";
+export { displayNumber } from "./display-number";
+export { durationText } from "./duration-text";
+export { fio2FromInput } from "./fio2-from-input";
+export { fio2TakenText } from "./fio2-taken-text";
+export { instantsOfWallTime } from "./instants-of-wall-time";
+export { inwardMillilitres } from "./inward-millilitres";
+export { kpaFromMmHg } from "./kpa-from-mm-hg";
+export { localDate } from "./local-date";
+export { mmHgFromKpa } from "./mm-hg-from-kpa";
+export { offsetIso } from "./offset-iso";
+export { roundHalfUp } from "./round-half-up";
+export { timeOfDay } from "./time-of-day";
+export type { Instant } from "./instant";
