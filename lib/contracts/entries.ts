@@ -1,7 +1,13 @@
 import { z } from "zod";
 import { clientKeySchema, idSchema, instantSchema, reasonSchema } from "./fields";
 import { heightIssues, heightShape } from "./heights";
-import { mechanicsValuesSchema, observationsValuesSchema } from "./measurements";
+import {
+  addIssues,
+  checkMechanics,
+  checkObservations,
+  mechanicsValuesSchema,
+  observationsValuesSchema,
+} from "./measurements";
 import { settingsValuesSchema } from "./settings";
 
 /** Kinds that can be charted so far; a kind is its route's last segment. */
@@ -28,17 +34,15 @@ export const settingsCheckBodySchema = z.strictObject({ ...submitted, basedOn: b
 
 export const mechanicsBodySchema = z
   .strictObject({ ...submitted, ...mechanicsValuesSchema.shape })
-  .superRefine(checked(mechanicsValuesSchema));
+  .superRefine(checkMechanics);
 
 export const observationsBodySchema = z
   .strictObject({ ...submitted, ...observationsValuesSchema.shape })
-  .superRefine(checked(observationsValuesSchema));
+  .superRefine(checkObservations);
 
 export const heightBodySchema = z
   .strictObject({ ...submitted, ...heightShape, reason: reasonSchema.optional() })
-  .superRefine((height, context) => {
-    for (const { path, message } of heightIssues(height)) context.addIssue({ code: "custom", path: [path], message });
-  });
+  .superRefine((height, context) => addIssues(context, heightIssues(height)));
 
 export const bedsideEntryBodySchema = z
   .strictObject({
@@ -55,17 +59,11 @@ export const bedsideEntryBodySchema = z
 const replacementSchemas = {
   settings: z.strictObject({ ...chartedAt, reason: reasonSchema.optional(), ...settingsValuesSchema.shape }),
   "settings-checks": z.strictObject(chartedAt),
-  mechanics: z
-    .strictObject({ ...chartedAt, ...mechanicsValuesSchema.shape })
-    .superRefine(checked(mechanicsValuesSchema)),
-  observations: z
-    .strictObject({ ...chartedAt, ...observationsValuesSchema.shape })
-    .superRefine(checked(observationsValuesSchema)),
+  mechanics: z.strictObject({ ...chartedAt, ...mechanicsValuesSchema.shape }).superRefine(checkMechanics),
+  observations: z.strictObject({ ...chartedAt, ...observationsValuesSchema.shape }).superRefine(checkObservations),
   heights: z
     .strictObject({ ...chartedAt, ...heightShape, reason: reasonSchema.optional() })
-    .superRefine((height, context) => {
-      for (const { path, message } of heightIssues(height)) context.addIssue({ code: "custom", path: [path], message });
-    }),
+    .superRefine((height, context) => addIssues(context, heightIssues(height))),
 } as const;
 
 export function replacementSchemaOf<Kind extends EntryKind>(kind: Kind): (typeof replacementSchemas)[Kind] {
@@ -101,13 +99,3 @@ export type HeightBody = z.infer<typeof heightBodySchema>;
 export type BedsideEntryBody = z.infer<typeof bedsideEntryBodySchema>;
 export type CorrectionBody = z.infer<typeof correctionBodySchema>;
 export type SubmissionVoidBody = z.infer<typeof submissionVoidBodySchema>;
-
-/** Runs a values schema's cross-field refinements on a body that carries `chartedAt` and the key as well. */
-function checked(values: z.ZodType) {
-  return (body: Record<string, unknown>, context: z.core.$RefinementCtx) => {
-    const { chartedAt: _at, clientKey: _key, ...rest } = body;
-    const result = values.safeParse(rest);
-    for (const issue of result.error?.issues ?? [])
-      context.addIssue({ code: "custom", path: [...issue.path], message: issue.message });
-  };
-}

@@ -78,29 +78,41 @@ export function plateauOverSetPeepIssue(
   return { path: "plateauCmH2O", message: `Plateau ${plateau} is not above the set PEEP ${setPeep}: check both.` };
 }
 
-const needsOne = (what: string) => `Enter at least one ${what}.`;
-const holdsOne = (values: object) => Object.values(values).some((value) => value !== undefined);
+const observationsShape = {
+  spo2Percent: charted("spo2Percent").optional(),
+  etco2MmHg: charted("etco2MmHg").optional(),
+  respiratoryRateTotal: charted("respiratoryRateTotal").optional(),
+  heartRate: charted("heartRate").optional(),
+  systolicMmHg: charted("systolicMmHg").optional(),
+  mapMmHg: charted("mapMmHg").optional(),
+};
 
-export const mechanicsValuesSchema = z
-  .strictObject(mechanicsShape)
-  .refine(holdsOne, needsOne("measurement"))
-  .superRefine((reading, context) => {
-    for (const { path, message } of mechanicsIssues(reading))
-      context.addIssue({ code: "custom", path: [path], message });
-  });
+/** An entry of a kind charts at least one of that kind's values. */
+function emptyIssues(shape: object, values: object, what: string) {
+  const charts = Object.entries(values).some(([name, value]) => name in shape && value !== undefined);
+  return charts ? [] : [{ path: "", message: `Enter at least one ${what}.` }];
+}
+
+/** The cross-field rules of a mechanics body, with or without its key and time. */
+export function checkMechanics(reading: HoldAndPressures, context: z.core.$RefinementCtx) {
+  addIssues(context, [...emptyIssues(mechanicsShape, reading, "measurement"), ...mechanicsIssues(reading)]);
+}
+
+export function checkObservations(observations: object, context: z.core.$RefinementCtx) {
+  addIssues(context, emptyIssues(observationsShape, observations, "observation"));
+}
+
+export function addIssues(context: z.core.$RefinementCtx, issues: readonly { path: string; message: string }[]) {
+  for (const { path, message } of issues) {
+    context.addIssue({ code: "custom", path: path ? [path] : [], message });
+  }
+}
+
+export const mechanicsValuesSchema = z.strictObject(mechanicsShape).superRefine(checkMechanics);
 
 export type MechanicsValues = z.infer<typeof mechanicsValuesSchema>;
 
-export const observationsValuesSchema = z
-  .strictObject({
-    spo2Percent: charted("spo2Percent").optional(),
-    etco2MmHg: charted("etco2MmHg").optional(),
-    respiratoryRateTotal: charted("respiratoryRateTotal").optional(),
-    heartRate: charted("heartRate").optional(),
-    systolicMmHg: charted("systolicMmHg").optional(),
-    mapMmHg: charted("mapMmHg").optional(),
-  })
-  .refine(holdsOne, needsOne("observation"));
+export const observationsValuesSchema = z.strictObject(observationsShape).superRefine(checkObservations);
 
 export type ObservationsValues = z.infer<typeof observationsValuesSchema>;
 

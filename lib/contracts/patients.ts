@@ -1,12 +1,11 @@
 import { z } from "zod";
 import { clientKeySchema, idSchema, instantSchema } from "./fields";
+import { addIssues } from "./measurements";
 import { heightIssues, heightShape } from "./heights";
 
 const admissionHeightSchema = z
   .strictObject({ ...heightShape, chartedAt: instantSchema.optional() })
-  .superRefine((height, context) => {
-    for (const { path, message } of heightIssues(height)) context.addIssue({ code: "custom", path: [path], message });
-  });
+  .superRefine((height, context) => addIssues(context, heightIssues(height)));
 
 /** Admission: identity, bed and when the tube went in. Under 16 is refused by the use case, from the birth date. */
 export const admissionBodySchema = z.strictObject({
