@@ -1,0 +1,136 @@
+import { openSync, closeSync } from "node:fs";
+import { mkdir, readFile, rename, rm, stat, writeFile } from "node:fs/promises";
+import { basename, join } from "node:path";
+import { setTimeout as sleep } from "node:timers/promises";
+import { atEnd } from "./lifetime.mjs";
+import { freePort, isFree } from "./ports.mjs";
+import { postgresPrograms } from "./postgres-programs.mjs";
+import { capture, start, stop } from "./processes.mjs";
+import { Refusal } from "./refusal.mjs";
+import { secret } from "./secrets.mjs";
+import { commandLine, endProcesses, processesWhere } from "./system-processes.mjs";
+import { unprivileged } from "./unprivileged.mjs";
+
+const START_TIMEOUT_MS = 60_000;
+const LOG_LIMIT_BYTES = 10_000_000;
+
+export const SUPERUSER = "postgres";
+
+const exists = (path) => stat(path).then(Boolean, () => false);
+
+/** Words of a shell that PostgreSQL reads must not leak into the demo: only these reach its programs. */
+export const postgresEnvironment = () => ({ PATH: process.env.PATH, LC_ALL: "C.UTF-8", TZ: "UTC" });
+
+/** Ends a server that an earlier launcher left behind on this folder, and its pid file. */
+export async function endOrphanedServer(folder) {
+  const orphans = processesWhere((pid) => {
+    const [program = "", ...args] = commandLine(pid);
+    return basename(program) === "postgres" && args.includes(folder);
+  });
+  // INT is PostgreSQL's fast shutdown: sessions end, nothing is lost.
+  await endProcesses(orphans, "SIGINT", 20_000);
+  // The number in a pid file left behind may by now be another program's, and PostgreSQL would refuse to start.
+  await rm(join(folder, "postmaster.pid"), { force: true });
+}
+
+async function initialise({ folder, programs, password }) {
+  const draft = `${folder}.new`;
+  await rm(draft, { recursive: true, force: true });
+  await mkdir(join(draft, "data"), { recursive: true, mode: 0o700 });
+  await writeFile(join(draft, "password"), password, { mode: 0o600 });
+  const [command, ...args] = [...(await unprivileged(draft)), join(programs, "initdb")];
+  const settings = ["--auth=scram-sha-256", "--encoding=UTF8", "--locale=C.UTF-8", `--username=${SUPERUSER}`];
+  const { code, stdout, stderr } = await capture(
+    command,
+    [...args, "-D", join(draft, "data"), ...settings, `--pwfile=${join(draft, "password")}`],
+    { cwd: "/", env: postgresEnvironment() },
+  );
+  if (code !== 0) throw new Refusal(`PostgreSQL could not make its cluster in ${folder}:\n${stdout}${stderr}`);
+  // Renamed when complete, so that an interrupted first start leaves no half cluster.
+  await rename(join(draft, "data"), folder);
+  await rm(draft, { recursive: true, force: true });
+}
+
+async function openLog(path) {
+  const size = await stat(path).then(
+    (file) => file.size,
+    () => 0,
+  );
+  return openSync(path, size > LOG_LIMIT_BYTES ? "w" : "a", 0o600);
+}
+
+async function startServer({ folder, programs, port, durable, log }) {
+  const settings = {
+    listen_addresses: "127.0.0.1",
+    port,
+    unix_socket_directories: "",
+    timezone: "UTC",
+    log_timezone: "UTC",
+    ...(durable ? {} : { fsync: "off", synchronous_commit: "off", full_page_writes: "off" }),
+  };
+  const options = Object.entries(settings).flatMap(([name, value]) => ["-c", `${name}=${value}`]);
+  const [command, ...args] = [...(await unprivileged(folder)), join(programs, "postgres"), "-D", folder, ...options];
+  const output = await openLog(log);
+  try {
+    return start(command, args, { cwd: "/", env: postgresEnvironment(), stdio: ["ignore", output, output] });
+  } finally {
+    closeSync(output);
+  }
+}
+
+/** The last line of postmaster.pid says 'ready' once connections are accepted. */
+async function untilReady(server, folder) {
+  const deadline = Date.now() + START_TIMEOUT_MS;
+  let ended = false;
+  void server.ended.then(() => (ended = true));
+  while (!ended && Date.now() < deadline) {
+    const lines = await readFile(join(folder, "postmaster.pid"), "utf8").catch(() => "");
+    if (/^ready/m.test(lines)) return true;
+    await sleep(30);
+  }
+  return false;
+}
+
+async function choosePort(wanted, rememberedIn) {
+  if (wanted) {
+    if (await isFree(wanted)) return wanted;
+    throw new Refusal(`Port ${wanted} (NEAPTIDE_PG_PORT) is taken. Choose another, or unset it to take a free one.`);
+  }
+  const remembered = Number(await readFile(rememberedIn, "utf8").catch(() => ""));
+  if (remembered && (await isFree(remembered))) return remembered;
+  return freePort();
+}
+
+async function startOnSomePort(cluster, wanted, rememberedIn) {
+  // A free port can be taken by another checkout in the moment before PostgreSQL listens on it.
+  for (let attempt = 1; attempt <= 3; attempt += 1) {
+    const port = await choosePort(wanted, rememberedIn);
+    const server = await startServer({ ...cluster, port });
+    atEnd(() => stop(server, "SIGINT", 20_000));
+    if (await untilReady(server, cluster.folder)) {
+      await writeFile(rememberedIn, String(port));
+      return { server, port };
+    }
+    await stop(server, "SIGINT", 5_000);
+    if (wanted || (await isFree(port))) break;
+  }
+  const said = await readFile(cluster.log, "utf8").catch(() => "");
+  throw new Refusal(
+    `PostgreSQL did not start. Its log, ${cluster.log}, ends:\n${said.trimEnd().split("\n").slice(-8).join("\n")}`,
+  );
+}
+
+/**
+ * Starts the cluster of a data folder, made at the first call. It listens on loopback only and stops with the launcher.
+ * `durable: false` trades safety against a power cut for speed: for tests.
+ */
+export async function startCluster({ data, pgPort, durable = true }) {
+  const folder = join(data, "pg");
+  await endOrphanedServer(folder);
+  const programs = await postgresPrograms(folder);
+  const password = await secret(data, "postgres-superuser");
+  if (!(await exists(folder))) await initialise({ folder, programs, password });
+  const cluster = { folder, programs, durable, log: join(data, "postgres.log") };
+  const { server, port } = await startOnSomePort(cluster, pgPort, join(data, "pg-port"));
+  return { port, programs, password, server };
+}

@@ -1,0 +1,54 @@
+import { startNothingMore, stopAll } from "./processes.mjs";
+import { Refusal } from "./refusal.mjs";
+
+const stops = [];
+let ending;
+
+/** Registers what to stop at the end; the last registered stops first. */
+export function atEnd(stop) {
+  stops.push(stop);
+}
+
+async function stopInOrder() {
+  for (const stop of stops.reverse()) {
+    try {
+      await stop();
+    } catch (error) {
+      console.error(`While stopping: ${error.message}`);
+    }
+  }
+  await stopAll();
+}
+
+/** Stops everything once, then exits; later calls wait for the first. */
+export function end(code) {
+  ending ??= stopInOrder().then(() => process.exit(code));
+  return ending;
+}
+
+export const isEnding = () => ending !== undefined;
+
+const exitCodes = { SIGINT: 130, SIGTERM: 143, SIGHUP: 129 };
+
+function listenForSignals(exitCodeOf) {
+  for (const signal of Object.keys(exitCodes)) {
+    // `on`, not `once`: npm passes a Ctrl-C on that the terminal has already delivered.
+    process.on(signal, () => {
+      startNothingMore();
+      void end(exitCodeOf(signal));
+    });
+  }
+}
+
+/** Runs a command of the launcher: signals, refusals and faults all end with nothing left running. */
+export async function launch(main) {
+  let served = false;
+  listenForSignals((signal) => (served ? 0 : exitCodes[signal]));
+  try {
+    await end(await main({ serving: () => (served = true) }));
+  } catch (error) {
+    if (isEnding()) return ending;
+    console.error(error instanceof Refusal ? error.message : error);
+    await end(1);
+  }
+}
