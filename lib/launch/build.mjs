@@ -3,7 +3,7 @@ import { readFile, rm, writeFile } from "node:fs/promises";
 import { join } from "node:path";
 import { refuseWhileServed, withCheckoutLock } from "./checkout.mjs";
 import { childEnvironment } from "./child-environment.mjs";
-import { run } from "./processes.mjs";
+import { capture } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
 import { sourceHash } from "./source-hash.mjs";
 
@@ -20,8 +20,8 @@ async function build(root, data, hash) {
   const args = [join(root, "node_modules", "next", "dist", "bin", "next"), "build"];
   // No address of a database is given: a build that needs one is a fault.
   const env = childEnvironment(data);
-  const code = await run(process.execPath, args, { cwd: root, env, stdio: ["ignore", "inherit", "inherit"] });
-  if (code !== 0) throw new Refusal("The application could not be built; the reason stands above.");
+  const { code, stdout, stderr } = await capture(process.execPath, args, { cwd: root, env });
+  if (code !== 0) throw new Refusal(`${stdout}${stderr}\nThe application could not be built; the reason stands above.`);
   await writeFile(stampOf(root), hash);
 }
 

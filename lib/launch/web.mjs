@@ -13,7 +13,8 @@ const HEALTH_TIMEOUT_MS = 120_000;
 const HEALTH_ATTEMPT_MS = 5_000;
 
 // Next's own greeting; the launcher says where the server answers once it does.
-const GREETING = /^\s*(▲ Next\.js|- (Local|Network|Environments|Experiments)\b|✓ (Starting|Ready)\b|$)/;
+const GREETING =
+  /^\s*(▲ Next\.js|- (Local|Network|Environments|Experiments)\b|✓ (Starting|Ready|Running next\.config)\b|$)/;
 
 function forward(stream, log, print) {
   createInterface({ input: stream }).on("line", (line) => {
