@@ -97,6 +97,16 @@ export const dueSchema = z.object({
   overdue: z.boolean(),
 });
 
+/** How fresh a measured field is that has no derived number of its own. */
+export const measuredFreshnessSchema = derivedSchema.pick({
+  freshness: true,
+  changedAt: true,
+  changedByEntryId: true,
+  changedBy: true,
+  dueAt: true,
+  chartedAt: true,
+});
+
 export const causeSchema = z.object({ metric: z.string(), state: stateSchema, lastState: stateSchema.nullable() });
 
 const rangeSchema = z.object({ min: z.number().optional(), max: z.number().optional() });
@@ -201,6 +211,7 @@ export const worksheetSchema = z.object({
   findings: z.array(findingSchema),
   nextSteps: z.array(nextStepSchema),
   due: z.array(dueSchema),
+  measured: z.record(z.string(), measuredFreshnessSchema).default({}),
   group: groupSchema,
   causes: z.array(causeSchema),
   validUntil: z.string().nullable(),

@@ -103,11 +103,22 @@ export interface Due {
   overdue: boolean;
 }
 
+/** How fresh a measured field is that has no derived number of its own (exhaled volume, total PEEP, peak …). */
+export interface MeasuredFreshness {
+  freshness: FreshnessWord;
+  changedAt: string | null;
+  changedByEntryId: string | null;
+  changedBy: Derived["changedBy"];
+  dueAt: string | null;
+  chartedAt: string | null;
+}
+
 export interface Evaluation {
   derived: Record<DerivedName, Derived>;
   findings: Finding[];
   nextSteps: NextStep[];
   due: Due[];
+  measured: Record<string, MeasuredFreshness>;
   group: Group;
   /** Why the group is what it is, worst first: `{ metric, state }` of the checks that decide it. */
   causes: { metric: DerivedName; state: State; lastState: State | null }[];
