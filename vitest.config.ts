@@ -44,6 +44,18 @@ export default defineConfig({
           hookTimeout: 60_000,
         },
       },
+      {
+        extends: true,
+        test: {
+          name: "faults",
+          environment: "node",
+          include: ["tests/faults/**/*.test.ts"],
+          // Each starts the whole application; two at once only make both slow.
+          fileParallelism: false,
+          testTimeout: 120_000,
+          hookTimeout: 120_000,
+        },
+      },
     ],
   },
 });

@@ -14,6 +14,9 @@ import { unprivileged } from "./unprivileged.mjs";
 const START_TIMEOUT_MS = 60_000;
 const LOG_LIMIT_BYTES = 10_000_000;
 
+// A database a test worker, with pools of their own; and nothing here outlives the run.
+const FOR_TESTS = { max_connections: 200, fsync: "off", synchronous_commit: "off", full_page_writes: "off" };
+
 export const SUPERUSER = "postgres";
 
 const exists = (path) => stat(path).then(Boolean, () => false);
@@ -66,7 +69,7 @@ async function startServer({ folder, programs, port, durable, log }) {
     unix_socket_directories: "",
     timezone: "UTC",
     log_timezone: "UTC",
-    ...(durable ? {} : { fsync: "off", synchronous_commit: "off", full_page_writes: "off" }),
+    ...(durable ? {} : FOR_TESTS),
   };
   const options = Object.entries(settings).flatMap(([name, value]) => ["-c", `${name}=${value}`]);
   const [command, ...args] = [...(await unprivileged(folder)), join(programs, "postgres"), "-D", folder, ...options];
@@ -122,11 +125,12 @@ async function startOnSomePort(cluster, wanted, rememberedIn) {
 
 /**
  * Starts the cluster of a data folder, made at the first call. It listens on loopback only and stops with the launcher.
- * `durable: false` trades safety against a power cut for speed: for tests.
+ * `durable: false` is for tests: a new cluster each time, with safety against a power cut traded for speed.
  */
 export async function startCluster({ data, pgPort, durable = true }) {
   const folder = join(data, "pg");
   await endOrphanedServer(folder);
+  if (!durable) await rm(folder, { recursive: true, force: true });
   const programs = await postgresPrograms(folder);
   const password = await secret(data, "postgres-superuser");
   if (!(await exists(folder))) await initialise({ folder, programs, password });

@@ -61,7 +61,8 @@ function within(promise, milliseconds) {
 
 /** Asks with `signal`, waits, then kills. What the program started in its group goes with it. */
 export async function stop(started, signal = "SIGTERM", graceMs = 10_000) {
-  if (!started.pid) return;
+  if (!started.pid || started.stopped) return;
+  started.stopped = true;
   if (running.has(started)) process.kill(started.pid, signal);
   await within(started.ended, graceMs);
   signalGroup(started.pid, "SIGKILL");
