@@ -1,0 +1,4 @@
+import { describe } from "vitest";
+import { runPublishedValues } from "./run-published-values";
+
+describe("Mechanical power", () => runPublishedValues("05-mech-power"));

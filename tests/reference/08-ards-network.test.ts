@@ -1,0 +1,4 @@
+import { describe } from "vitest";
+import { runPublishedValues } from "./run-published-values";
+
+describe("ARDS Network protocol", () => runPublishedValues("08-ardsnet"));

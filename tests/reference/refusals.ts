@@ -1,0 +1,20 @@
+/** What the product's RangeError says for each refusal of the tables: the field, the value, and what is allowed. */
+export const refusals: Readonly<Record<string, RegExp>> = {
+  "height-looks-like-metres": /^heightCm 1\.75 is outside the allowed 120 to 250; it looks like metres$/,
+  "height-out-of-range": /^heightCm (0|-160|70|300) is outside the allowed 120 to 250$/,
+  "sex-required": /^sex null cannot be used: allowed male or female$/,
+  "height-not-a-number": /^heightCm must be a number, got "abc": allowed 120 to 250$/,
+  "outside-table-range 18.5-32.0": /^ulnaCm 18 is outside the allowed 18\.5 to 32$/,
+  "age-band-required": /^ageYears must be a number, got null/,
+  "fio2-not-a-fraction": /^fio2 (40|60) is outside the allowed 0\.21 to 1; it looks like a percentage$/,
+  "fio2-out-of-range": /^fio2 0 is outside the allowed 0\.21 to 1$/,
+  "fio2-below-0.21": /^fio2 0\.2 is outside the allowed 0\.21 to 1$/,
+  "pao2-out-of-range": /^pao2MmHg -5 is outside the allowed 10 to 700$/,
+  "pplat-not-above-total-peep": /^plateauCmH2O (10|12) is not above totalPeepCmH2O 12: allowed above 12$/,
+  "ppeak-below-pplat": /^peakCmH2O 24 is below plateauCmH2O 26: allowed from 26$/,
+  "flow-must-be-positive": /^flowLPerMin 0 is outside the allowed 5 to 200$/,
+  "vt-looks-like-mL": /^tidalVolumeMl (450000|350000) is outside the allowed 20 to 2000$/,
+  "ve-looks-like-litres": /^minuteVolumeLPerMin 0\.009 is outside the allowed 0\.1 to 60$/,
+  "vt-not-above-dead-space": /^toTidalVolumeMl 140 is not above deadSpaceMl 150: allowed above 150$/,
+  "negative-dead-space": /^paco2MmHg 40 is below mixedExpiredCo2MmHg 41: allowed from 41$/,
+};
