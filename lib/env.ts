@@ -20,6 +20,11 @@ const serverSchema = z.object({
   NEXTAUTH_URL: z.url({ protocol: /^https?$/ }),
 });
 
+const poolSchema = z.object({
+  DATABASE_POOL_MAX: z.coerce.number().int().min(1).max(100).default(5),
+  DATABASE_LOG_SQL: z.enum(["0", "1"]).default("0"),
+});
+
 const migrationSchema = z.object({
   MIGRATION_DATABASE_URL: postgresUrl,
   APP_DATABASE_ROLE: z
@@ -50,4 +55,9 @@ export function env(): ServerEnvironment {
 /** What a migration needs; the web process has none of it. */
 export function migrationEnv(): MigrationEnvironment {
   return (migration ??= parse(migrationSchema));
+}
+
+/** How the connection pool behaves. Every part has a default, so it can be read at import. */
+export function poolEnv(): z.output<typeof poolSchema> {
+  return parse(poolSchema);
 }

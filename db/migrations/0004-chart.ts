@@ -169,7 +169,7 @@ const observations = detailTable("observations", "observations", [
   `CONSTRAINT observations_something_ck CHECK (num_nonnulls(${observationNumbers.map(([column]) => column).join(", ")}) > 0)`,
 ]);
 
-// Only the length that was measured: a height worked out from it follows on reading, with the birth date then known.
+// The length that was measured; height_cm beside it is what was worked out from it when it was charted.
 const heights = detailTable("heights", "heights", [
   `${wordColumn("heights", "method", ["measured-standing", "measured-lying", "document", "ulna", "knee-height", "demispan", "reported"])} NOT NULL`,
   `${wordColumn("heights", "sex_for_pbw", ["male", "female"])} NOT NULL`,
@@ -179,10 +179,10 @@ const heights = detailTable("heights", "heights", [
   numericColumn("heights", "knee_height_cm", [30, 75]),
   reasonColumn("heights"),
   `CONSTRAINT heights_length_of_method_ck CHECK (
-      num_nonnulls(height_cm, ulna_cm, demispan_cm, knee_height_cm) = 1
-      AND (method = 'ulna') = (ulna_cm IS NOT NULL)
+      (method = 'ulna') = (ulna_cm IS NOT NULL)
       AND (method = 'demispan') = (demispan_cm IS NOT NULL)
-      AND (method = 'knee-height') = (knee_height_cm IS NOT NULL))`,
+      AND (method = 'knee-height') = (knee_height_cm IS NOT NULL)
+      AND num_nonnulls(height_cm, ulna_cm, demispan_cm, knee_height_cm) > 0)`,
 ]);
 
 const derivedNames = [

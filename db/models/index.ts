@@ -1,0 +1,25 @@
+import "./associations";
+
+export { Acknowledgement } from "./acknowledgement";
+export { AuditEvent } from "./audit-event";
+export { Bed } from "./bed";
+export { BedStay } from "./bed-stay";
+export { ChartEntry } from "./chart-entry";
+export { EpisodePause } from "./episode-pause";
+export { Height } from "./height";
+export { Hospital } from "./hospital";
+export { HospitalAdministrator } from "./hospital-administrator";
+export { MechanicsReading } from "./mechanics-reading";
+export { Observation } from "./observation";
+export { Patient } from "./patient";
+export { Session } from "./session";
+export { SettingChange } from "./setting-change";
+export { SettingsCheck } from "./settings-check";
+export { SignInAttempt } from "./sign-in-attempt";
+export { Submission } from "./submission";
+export { TargetOrder } from "./target-order";
+export { Unit } from "./unit";
+export { UnitMembership } from "./unit-membership";
+export { UnitPolicy } from "./unit-policy";
+export { User } from "./user";
+export { VentilationEpisode } from "./ventilation-episode";
