@@ -13,4 +13,4 @@ export function Subscripted({ text }: { text: string }) {
   );
 }
 
-const lowered = /(?<=SpO|FiO|PaO|SaO|CO|H)(2)|(?<=HCO)(3)/;
+const lowered = /(?<=[a-zC]O|cmH)([23])(?!\d)/;
