@@ -42,13 +42,16 @@ export async function admit<Held extends Right, Params extends z.ZodType>(
   const actor = await actorOf(request.headers.get("cookie"), { now, acts: writes });
   const params = (paramsSchema && checkedParams(paramsSchema, path)) as z.output<Params>;
   const sent = body ? once(() => readJson(request)) : async () => undefined;
-  const granted = await grant(
-    access,
-    { actor, now },
-    { params, json: sent, refuse: (json) => body && checked(body, json) },
-  );
+  const granted = await grant(access, { actor, now }, { params, json: sent });
   const json = await sent();
+  if (granted === null) throw unnamedRow(body, json);
   return { actor, now, granted, params, json, hash: bodyHash(request.method, new URL(request.url).pathname, json) };
+}
+
+/** Only a body that does not name its unit leaves nothing to grant; its schema says so, with all else that is wrong. */
+function unnamedRow(body: z.ZodType | undefined, json: unknown): Error {
+  if (body) checked(body, json);
+  return new Error("A body without the id of its unit passed its schema.");
 }
 
 function once<Value>(make: () => Promise<Value>): () => Promise<Value> {
