@@ -41,7 +41,10 @@ export async function dataFolder(path) {
   return realpath(path);
 }
 
-/** What the environment asks of the launcher. */
+/**
+ * What the environment asks of the launcher.
+ * @param {Record<string, string | undefined>} [environment]
+ */
 export function readSettings(environment = process.env) {
   const data = environment.NEAPTIDE_DATA || ".data";
   return {
