@@ -1,0 +1,4 @@
+import { authRoute } from "@/lib/http/auth-route";
+
+export const GET = authRoute;
+export const POST = authRoute;

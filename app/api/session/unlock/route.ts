@@ -1,0 +1,3 @@
+import { unlockRoute } from "@/lib/http/unlock-route";
+
+export const POST = unlockRoute();
