@@ -40,7 +40,8 @@ async function byAccount(folder) {
   const account = serverAccount();
   await ensureOwner(folder, account);
   const prefixes = CAPABILITIES.map((capability) => withCapability(account, capability));
-  const prefix = prefixes.find((words) => succeeds([...words, "test", "-w", folder]));
+  // `test -w` would not do: access(2) looks away from capabilities.
+  const prefix = prefixes.find((words) => succeeds([...words, "stat", join(folder, ".")]));
   if (!prefix) {
     throw new Refusal(
       `PostgreSQL does not run as root, and no other user of this system can reach ${folder}. Set NEAPTIDE_DATA to a folder outside of root's own, or run as another user.`,
