@@ -8,7 +8,7 @@ import { observeServerTime } from "./server-clock";
 import { pollEveryMs } from "./use-worksheet";
 
 /** The unit's beds as rendered by the server, then kept fresh. */
-export function useBeds({ unitId, initial }: { unitId: string; initial?: BedsAnswer | undefined }) {
+export function useBeds({ unitId, initial }: { unitId: string; initial: BedsAnswer }) {
   return useQuery({
     queryKey: queryKeys.beds(unitId),
     queryFn: async ({ signal }) => {
@@ -16,7 +16,8 @@ export function useBeds({ unitId, initial }: { unitId: string; initial?: BedsAns
       observeServerTime(beds.at);
       return beds;
     },
-    ...(initial && { initialData: initial, initialDataUpdatedAt: Date.parse(initial.at) }),
+    initialData: initial,
+    initialDataUpdatedAt: Date.parse(initial.at),
     refetchInterval: pollEveryMs,
     refetchOnWindowFocus: "always",
   });

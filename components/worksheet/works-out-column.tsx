@@ -1,0 +1,89 @@
+import { Freshness } from "@/components/figures/freshness";
+import { StateWord } from "@/components/figures/state-word";
+import { trackDomains, type TrackMetric } from "@/components/figures/track-domain";
+import type { Derived, Worksheet } from "@/lib/contracts";
+import { displayNumber, timeOfDay } from "@/lib/format";
+import { arithmeticOf } from "./arithmetic";
+import { ColumnHead } from "./column-head";
+import { freshnessOf } from "./freshness-of";
+import { Judged } from "./judged";
+import { noteWords } from "./note-words";
+import { derivedRows, gasDerivedRows, lastDerivedRows, type DerivedRow } from "./rows";
+import { NotMeasured, SheetCell, SheetNumber } from "./sheet-cell";
+
+interface WorksOutColumnProps {
+  sheet: Worksheet;
+  now: number;
+  onWhereFrom: (row: DerivedRow) => void;
+}
+
+/** What the settings and readings come to, each with its sum; nothing worked out from a stale input is shown as true. */
+export function WorksOutColumn({ sheet, now, onWhereFrom }: WorksOutColumnProps) {
+  const clock = { now, timeZone: sheet.unit.timeZone };
+  const rows = [...derivedRows, ...(sheet.bloodGas ? gasDerivedRows : []), ...lastDerivedRows];
+  return (
+    <section aria-label="Works out to">
+      <ColumnHead title="Works out to" aside="how, or last value" />
+      {rows.map((row) => {
+        const derived = sheet.derived[row.name];
+        if (!derived) return null;
+        return <DerivedCell key={row.name} row={row} derived={derived} clock={clock} onOpen={() => onWhereFrom(row)} />;
+      })}
+    </section>
+  );
+}
+
+interface DerivedCellProps {
+  row: DerivedRow;
+  derived: Derived;
+  clock: { now: number; timeZone: string };
+  onOpen: () => void;
+}
+
+function DerivedCell({ row, derived, clock, onOpen }: DerivedCellProps) {
+  const { value, state } = derived;
+  const aside = value === null ? lastWords(row, derived, clock.timeZone) : arithmeticOf(row.name, derived);
+  return (
+    <SheetCell label={row.label} aside={aside} onOpen={onOpen} opens={`where ${row.label} comes from`}>
+      {value === null ? (
+        <Unmeasured row={row} derived={derived} clock={clock} />
+      ) : (
+        <>
+          <SheetNumber text={writeDerived(row, derived, value)} unit={unitWords(row, derived)} />
+          {state && row.name in trackDomains && (
+            <Judged {...derived} metric={row.name as TrackMetric} name={row.label} state={state} trackWidth={104} />
+          )}
+        </>
+      )}
+    </SheetCell>
+  );
+}
+
+/** 'mL/kg', 'L/min, set × set', 'moderate'. */
+function unitWords(row: DerivedRow, { unit, band, notes }: Derived): string {
+  const measuredIn = unit === "mL" ? "mL" : row.unit;
+  return [measuredIn, band, noteWords(notes)].filter(Boolean).join(", ");
+}
+
+/** Decimals grow where rounding would hide on which side of a limit the value stands. */
+export function writeDerived(row: DerivedRow, { limit }: Derived, value: number): string {
+  const limits = [limit?.min, limit?.max].filter((each) => each !== undefined);
+  return displayNumber({ value, decimals: row.decimals, limit: limits });
+}
+
+function lastWords(row: DerivedRow, derived: Derived, timeZone: string): string {
+  if (derived.lastValue === null || !derived.chartedAt) return "";
+  const last = writeDerived(row, derived, derived.lastValue);
+  return `was ${last} at ${timeOfDay({ at: derived.chartedAt, timeZone })}`;
+}
+
+function Unmeasured({ row, derived, clock }: Pick<DerivedCellProps, "row" | "derived" | "clock">) {
+  if (derived.state === "not-asked") return <span className="text-muted t-body">not asked</span>;
+  if (derived.lastState === "outside" && derived.chartedAt) {
+    const at = timeOfDay({ at: derived.chartedAt, timeZone: clock.timeZone });
+    return <StateWord state="unmeasured" lastOutsideAt={at} />;
+  }
+  const note = noteWords(derived.notes);
+  if (note) return <NotMeasured why={note} />;
+  return <Freshness {...freshnessOf(derived, clock, row.needs)} narrow />;
+}

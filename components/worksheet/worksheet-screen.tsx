@@ -1,0 +1,88 @@
+"use client";
+
+import Link from "next/link";
+import { useRouter } from "next/navigation";
+import { useState } from "react";
+import { VolumeLadder } from "@/components/figures/volume-ladder";
+import type { HistoryOf } from "@/components/history/history-of";
+import { HistorySheet } from "@/components/history/history-sheet";
+import type { Worksheet } from "@/lib/contracts";
+import { useServerNow } from "@/lib/client/server-clock";
+import { useWorksheet } from "@/lib/client/use-worksheet";
+import { Connection } from "./connection";
+import { DueRail } from "./due-rail";
+import { EntryActions, EntryBar } from "./entry-actions";
+import { ladderOf } from "./ladder-of";
+import { MeasuredColumn } from "./measured-column";
+import { PatientStrip } from "./patient-strip";
+import { PhoneSummary } from "./phone-summary";
+import { SetColumn } from "./set-column";
+import { SpanPanel } from "./span-panel";
+import { WhereFrom } from "./where-from";
+import { WorksOutColumn } from "./works-out-column";
+import type { DerivedRow } from "./rows";
+
+/** One patient: what is set, what was measured, what it works out to, and what is due. */
+export function WorksheetScreen({ initial }: { initial: Worksheet }) {
+  const query = useWorksheet({ patientId: initial.patient.id, initial });
+  const sheet = query.data;
+  const now = useServerNow(sheet.at);
+  const [history, setHistory] = useState<HistoryOf | null>(null);
+  const [whereFrom, setWhereFrom] = useState<DerivedRow | null>(null);
+  const router = useRouter();
+  const enter = (field: string) => router.push(`/patients/${sheet.patient.id}/record?focus=${field}`);
+  const hours = Math.max(0, Math.floor((now - Date.parse(sheet.episode.intubatedAt)) / 3_600_000));
+  return (
+    <>
+      <PatientStrip sheet={sheet} hours={hours} actions={<EntryActions sheet={sheet} />} />
+      <Connection sheet={sheet} failing={query.failureCount > 0} now={now} />
+      <div className="flex desk:min-h-[calc(100dvh-148px)]">
+        <main id="content" className="min-w-0 flex-1 page-margin pb-24 desk:pb-12">
+          <PhoneSummary sheet={sheet} now={now} />
+          <Ladder sheet={sheet} />
+          <div className="grid gap-x-4 tablet:grid-cols-[148px_272px_1fr_196px] desk:grid-cols-[178px_292px_1fr_214px] desk:gap-x-6">
+            <SetColumn sheet={sheet} onEnter={enter} onHistory={setHistory} />
+            <MeasuredColumn sheet={sheet} now={now} onHistory={setHistory} />
+            <WorksOutColumn sheet={sheet} now={now} onWhereFrom={setWhereFrom} />
+            <div className="max-tablet:hidden">
+              <div className="max-desk:hidden">
+                <SpanPanel sheet={sheet} now={now} size="large" />
+              </div>
+              <div className="desk:hidden">
+                <SpanPanel sheet={sheet} now={now} size="medium" />
+              </div>
+            </div>
+          </div>
+        </main>
+        <DueRail sheet={sheet} now={now} onHistory={setHistory} />
+      </div>
+      <EntryBar sheet={sheet} now={now} />
+      <HistorySheet sheet={sheet} of={history} onClose={() => setHistory(null)} />
+      <WhereFrom sheet={sheet} row={whereFrom} now={now} onClose={() => setWhereFrom(null)} />
+    </>
+  );
+}
+
+function Ladder({ sheet }: { sheet: Worksheet }) {
+  const ladder = ladderOf(sheet);
+  const action = sheet.can.heights ? (
+    <Link href={`/patients/${sheet.patient.id}/record?focus=height`} className="text-accent underline t-state">
+      Measure height
+    </Link>
+  ) : undefined;
+  return (
+    <section aria-label="Volume ladder" className="pt-2 max-tablet:hidden">
+      <p className="text-muted t-label max-desk:hidden">
+        <b className="mr-2 text-ink t-head">Volume ladder</b>
+        {sheet.pbwKg !== null && "this patient’s millilitres at each mL/kg PBW. Shaded: "}
+        {sheet.pbwKg !== null && (sheet.targets.origin === "order" ? "ordered." : "the unit’s default.")}
+      </p>
+      <div className="max-desk:hidden">
+        <VolumeLadder size="full" {...ladder} action={action} />
+      </div>
+      <div className="pt-2 desk:hidden">
+        <VolumeLadder size="compact" {...ladder} action={action} />
+      </div>
+    </section>
+  );
+}
