@@ -5,10 +5,11 @@ import { dropFromDevice, keepOnDevice, readFromDevice } from "./device-store";
 export interface DraftOwner {
   userId: string;
   episodeId: string;
+  form: "record" | "height";
 }
 
-export function draftKey({ userId, episodeId }: DraftOwner): string {
-  return `draft:${userId}:${episodeId}`;
+export function draftKey({ userId, episodeId, form }: DraftOwner): string {
+  return `draft:${userId}:${episodeId}:${form}`;
 }
 
 /** This person's draft for this episode, or null: none, or one that an older version wrote in another shape. */
