@@ -51,4 +51,5 @@ export const clientKeySchema = z.uuid("The entry needs a key made on the device 
 
 export const reasonSchema = z.string().trim().min(1, "Say why, in a few words.").max(200, "At most 200 characters.");
 
-export const idSchema = z.string().regex(/^\d{1,19}$/, "Not an id.");
+/** One way to write it, and never beyond what PostgreSQL's bigint holds. */
+export const idSchema = z.string().regex(/^[1-9]\d{0,17}$/, "Not an id.");
