@@ -42,22 +42,20 @@ export function Stepper(props: StepperProps) {
   return (
     <div role="group" aria-label={label} className="flex h-14 w-[204px] shrink-0 items-stretch">
       <StepButton label={`${label}, less`} sign="−" {...hold(-1)} />
-      <button
-        type="button"
+      <div
         role="spinbutton"
+        tabIndex={0}
         aria-label={label}
         aria-valuenow={value ?? undefined}
         aria-valuetext={value === null ? "not charted" : spoken}
         aria-valuemin={props.min}
         aria-valuemax={props.max}
-        aria-haspopup="dialog"
-        aria-expanded={typing}
         onClick={() => onKeypad()}
         onKeyDown={(event) => stepByKey(event, press, onKeypad)}
-        className={`flex-1 rounded-[8px] text-center text-ink ${typing ? "outline-[2.5px] outline-accent" : ""}`}
+        className={`grid flex-1 cursor-pointer place-items-center rounded-[8px] text-ink ${typing ? "outline-[2.5px] outline-accent" : ""}`}
       >
         <Quantity text={text} className="n-step" />
-      </button>
+      </div>
       <StepButton label={`${label}, more`} sign="+" {...hold(1)} />
     </div>
   );
@@ -78,7 +76,7 @@ function StepButton({ label, sign, ...on }: { label: string; sign: string } & Re
   );
 }
 
-function stepByKey(event: KeyboardEvent, press: (direction: 1 | -1) => void, onKeypad: (firstKey: string) => void) {
+function stepByKey(event: KeyboardEvent, press: (direction: 1 | -1) => void, onKeypad: (firstKey?: string) => void) {
   if (event.ctrlKey || event.metaKey || event.altKey) return;
   if (event.key === "ArrowUp" || event.key === "ArrowDown") {
     event.preventDefault();
@@ -86,5 +84,8 @@ function stepByKey(event: KeyboardEvent, press: (direction: 1 | -1) => void, onK
   } else if (/^[0-9.,]$/.test(event.key)) {
     event.preventDefault();
     onKeypad(event.key === "," ? "." : event.key);
+  } else if (event.key === "Enter" || event.key === " ") {
+    event.preventDefault();
+    onKeypad();
   }
 }
