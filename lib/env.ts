@@ -61,3 +61,8 @@ export function migrationEnv(): MigrationEnvironment {
 export function poolEnv(): z.output<typeof poolSchema> {
   return parse(poolSchema);
 }
+
+/** Next's own development server, whose scripts need a looser policy. */
+export function isDevelopment(): boolean {
+  return process.env.NODE_ENV === "development";
+}

@@ -32,6 +32,11 @@ export async function respond(request: Request, handle: (requestId: string) => P
   );
   return Response.json(body, {
     status,
-    headers: { "Cache-Control": "no-store", "X-Request-Id": requestId, ...headers },
+    headers: {
+      "Cache-Control": "no-store",
+      "X-Content-Type-Options": "nosniff",
+      "X-Request-Id": requestId,
+      ...headers,
+    },
   });
 }
