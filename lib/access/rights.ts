@@ -17,8 +17,8 @@ export type Answer = "yes" | "no" | "lead" | "fio2-only" | "where-nurses-set" | 
  */
 export type RightScope = "self" | "patient" | "unit" | "admission" | "hospital";
 
-interface RightLine {
-  scope: RightScope;
+interface RightLine<Scope extends RightScope = RightScope> {
+  scope: Scope;
   therapist: Answer;
   intensivist: Answer;
   nurse: Answer;
@@ -31,7 +31,7 @@ const line = <Scope extends RightScope>(
   intensivist: Answer,
   nurse: Answer,
   administrator: "yes" | "no" = "no",
-) => ({ scope, therapist, intensivist, nurse, administrator }) as const satisfies RightLine;
+): RightLine<Scope> => ({ scope, therapist, intensivist, nurse, administrator });
 
 const all = <Scope extends RightScope>(scope: Scope) => line(scope, "yes", "yes", "yes");
 const setters = <Scope extends RightScope>(scope: Scope) => line(scope, "yes", "yes", "no");
