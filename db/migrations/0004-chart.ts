@@ -173,7 +173,7 @@ const observations = detailTable("observations", "observations", [
 const heights = detailTable("heights", "heights", [
   `${wordColumn("heights", "method", ["measured-standing", "measured-lying", "document", "ulna", "knee-height", "demispan", "reported"])} NOT NULL`,
   `${wordColumn("heights", "sex_for_pbw", ["male", "female"])} NOT NULL`,
-  numericColumn("heights", "height_cm", [100, 250]),
+  `${numericColumn("heights", "height_cm", [100, 250])} NOT NULL`,
   numericColumn("heights", "ulna_cm", [18.5, 32]),
   numericColumn("heights", "demispan_cm", [50, 120]),
   numericColumn("heights", "knee_height_cm", [30, 75]),
@@ -181,8 +181,7 @@ const heights = detailTable("heights", "heights", [
   `CONSTRAINT heights_length_of_method_ck CHECK (
       (method = 'ulna') = (ulna_cm IS NOT NULL)
       AND (method = 'demispan') = (demispan_cm IS NOT NULL)
-      AND (method = 'knee-height') = (knee_height_cm IS NOT NULL)
-      AND num_nonnulls(height_cm, ulna_cm, demispan_cm, knee_height_cm) > 0)`,
+      AND (method = 'knee-height') = (knee_height_cm IS NOT NULL))`,
 ]);
 
 const derivedNames = [

@@ -9,7 +9,7 @@ export class Height extends Model<InferAttributes<Height>, InferCreationAttribut
     "measured-standing" | "measured-lying" | "document" | "ulna" | "knee-height" | "demispan" | "reported";
   declare sexForPbw: "male" | "female";
   /** As measured, or as worked out from the length below when it was charted. */
-  declare heightCm: number | null;
+  declare heightCm: number;
   declare ulnaCm: number | null;
   declare demispanCm: number | null;
   declare kneeHeightCm: number | null;
@@ -23,7 +23,7 @@ Height.init(
     kind: optionalText(),
     method: text(),
     sexForPbw: text(),
-    heightCm: number(),
+    heightCm: { ...number(), allowNull: false },
     ulnaCm: number(),
     demispanCm: number(),
     kneeHeightCm: number(),

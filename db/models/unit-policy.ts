@@ -1,16 +1,6 @@
 import { Model, type CreationOptional, type InferAttributes, type InferCreationAttributes } from "sequelize";
 import { sequelize } from "../connection";
-import {
-  flag,
-  id,
-  json,
-  number,
-  optionalMoment,
-  optionalReference,
-  recordedMoment,
-  reference,
-  text,
-} from "./columns";
+import { flag, id, json, number, optionalMoment, optionalReference, recordedMoment, reference, text } from "./columns";
 
 /** Append-only: the newest version of a unit by (recordedAt, id) is in force. */
 export class UnitPolicy extends Model<InferAttributes<UnitPolicy>, InferCreationAttributes<UnitPolicy>> {

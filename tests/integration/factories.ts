@@ -12,24 +12,10 @@ import {
   User,
   VentilationEpisode,
 } from "@/db/models";
+import { targetsFromSet } from "@/lib/protocol/starting-sets";
 
 let serial = 0;
 const next = () => (serial += 1);
-
-/** The unit default where no lung injury is known, as a unit starts with (rules O3). */
-export const startingTargets = {
-  conditions: [],
-  vtMlPerKg: { min: 4, max: 8, goal: { min: 6, max: 8 } },
-  vtMl: null,
-  plateauCmH2O: { max: 30 },
-  drivingPressureCmH2O: { max: 15 },
-  spo2Percent: { min: 92, max: 96 },
-  pao2MmHg: { min: 60, max: 100 },
-  ph: { min: 7.3, max: 7.45 },
-  paco2MmHg: null,
-  respiratoryRate: { max: 35 },
-  peepTable: "none",
-};
 
 /** Each builder writes one row through the application's role; what is not given is invented and unique. */
 export async function buildHospital(overrides: Partial<CreationAttributes<Hospital>> = {}): Promise<Hospital> {
@@ -47,7 +33,7 @@ export async function buildUnit(
     timeZone: "Europe/London",
     barometricPressureMmHg: 760,
     gasUnit: "mmHg",
-    defaultTargets: startingTargets,
+    defaultTargets: targetsFromSet("unit-default"),
     ...policy,
   });
   return unit;
