@@ -14,4 +14,3 @@ export { mmHgFromKpa } from "./mm-hg-from-kpa";
 export { offsetIso } from "./offset-iso";
 export { roundHalfUp } from "./round-half-up";
 export { timeOfDay } from "./time-of-day";
-export type { Instant } from "./instant";

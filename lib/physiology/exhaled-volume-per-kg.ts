@@ -14,7 +14,7 @@ import { requireInRange } from "./require-in-range";
 export function exhaledVolumePerKg(input: { exhaledTidalVolumeMl: number; pbwKg: number }): number {
   const pbwKg = requireInRange("pbwKg", input.pbwKg, derivedRanges.pbwKg);
   const { exhaledTidalVolumeMl: volumeMl } = input;
-  if (typeof volumeMl !== "number" || isRefused("exhaledTidalVolumeMl", volumeMl)) {
+  if (isRefused("exhaledTidalVolumeMl", volumeMl)) {
     const { refuse } = chartedRanges.exhaledTidalVolumeMl;
     return requireInRange("exhaledTidalVolumeMl", volumeMl, refuse, "tidalVolumeMl");
   }

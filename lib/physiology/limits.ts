@@ -81,7 +81,7 @@ export const pbwHeightCm = { min: 120, max: 250, extrapolatedBelow: 152.4 } as c
 export function isRefused(field: ChartedField, value: number): boolean {
   const { refuse, ...rest }: ChartedRange = chartedRanges[field];
   if (rest.zeroAllowed && value === 0) return false;
-  return !(value >= refuse.min && value <= refuse.max);
+  return !(Number.isFinite(value) && value >= refuse.min && value <= refuse.max);
 }
 
 /** Is an accepted value outside the ask range, so that a person confirms it with one extra tap? */

@@ -4,7 +4,7 @@ import { asNumber, run, type MappedRun } from "./mapping";
 
 const ucum = UcumLhcUtils.getInstance();
 
-export function convertByUcum(from: string, value: number, to: string): number | null {
+function convertByUcum(from: string, value: number, to: string): number | null {
   return ucum.convertUnitTo(from, value, to).toVal;
 }
 

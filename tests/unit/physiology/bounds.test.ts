@@ -34,6 +34,12 @@ describe("bounds belong to the range", () => {
     expect(ask.max).toBeLessThanOrEqual(refuse.max);
   });
 
+  test("what is no number is refused in every field", () => {
+    const noNumbers = ["7", "", null, undefined, true, []] as unknown as number[];
+    const letThrough = fields.filter((field) => noNumbers.some((value) => !isRefused(field, value)));
+    expect(letThrough).toEqual([]);
+  });
+
   test("an exhaled volume of exactly 0 is charted after an extra tap", () => {
     expect(isRefused("exhaledTidalVolumeMl", 0)).toBe(false);
     expect(isUnusual("exhaledTidalVolumeMl", 0)).toBe(true);
