@@ -23,7 +23,7 @@ export function BedsScreen({ initial }: { initial: BedsAnswer }) {
   return (
     <>
       <NotRefreshed failing={query.failureCount > 0} at={at} now={now} timeZone={unit.timeZone} />
-      <main id="content" className="page-margin pb-12">
+      <div className="page-margin pb-12">
         <div className="flex min-h-[60px] flex-wrap items-baseline gap-x-5 pt-4">
           <h1 className="t-title">{unit.name}</h1>
           <p className="text-muted t-body">
@@ -50,7 +50,7 @@ export function BedsScreen({ initial }: { initial: BedsAnswer }) {
         {free.length > 0 && (
           <p className="pt-4 text-muted t-small">Free: {free.map(({ bed }) => bed.label).join(", ")}</p>
         )}
-      </main>
+      </div>
     </>
   );
 }

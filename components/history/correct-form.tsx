@@ -1,5 +1,5 @@
 import { useState, type FormEvent } from "react";
-import { Subscripted } from "@/components/figures/subscripted";
+import { TextField } from "@/components/ui/text-field";
 import { AppError, replacementSchemaOf, unitOf, wordsOf, type Entry, type Worksheet } from "@/lib/contracts";
 import { newClientKey } from "@/lib/client/new-client-key";
 import { useCorrectEntry } from "@/lib/client/use-correct-entry";
@@ -99,16 +99,12 @@ interface TextLineProps {
 
 function TextLine({ label, value, refusal, numeric = false, onChange }: TextLineProps) {
   return (
-    <label className="block t-label">
-      <Subscripted text={label} />
-      <input
-        className={`mt-1 h-[48px] w-full rounded-[6px] px-3 control t-body ${numeric ? "nums" : ""}`}
-        inputMode={numeric ? "decimal" : "text"}
-        value={value}
-        aria-invalid={refusal !== undefined}
-        onChange={(event) => onChange(event.target.value)}
-      />
-      {refusal && <span className="block pt-1 text-outside">{refusal}</span>}
-    </label>
+    <TextField
+      label={label}
+      value={value}
+      inputMode={numeric ? "decimal" : "text"}
+      onChange={(event) => onChange(event.target.value)}
+      {...(refusal && { error: refusal })}
+    />
   );
 }

@@ -1,3 +1,5 @@
+import { Button } from "@/components/ui/button";
+
 interface FormFootProps {
   verb: string;
   ready: boolean;
@@ -23,16 +25,12 @@ export function FormFoot({ verb, ready, sending, tryNumber, refusal, onCancel }:
         </p>
       )}
       <p className="flex gap-2">
-        <button
-          type="submit"
-          disabled={!ready || sending}
-          className="min-h-[48px] rounded-[6px] border-[1.5px] border-accent bg-accent px-4 text-on-accent t-state disabled:border-dashed disabled:border-rule disabled:bg-transparent disabled:text-muted"
-        >
+        <Button type="submit" look={ready && !sending ? "primary" : "dashed"} size="bar" disabled={!ready || sending}>
           {sending ? "Sending" : verb}
-        </button>
-        <button type="button" className="min-h-[48px] rounded-[6px] px-4 control t-state" onClick={onCancel}>
+        </Button>
+        <Button size="bar" onClick={onCancel}>
           Cancel
-        </button>
+        </Button>
       </p>
     </>
   );

@@ -1,3 +1,4 @@
+import { Button } from "@/components/ui/button";
 import { SideSheet } from "@/components/ui/side-sheet";
 import type { Worksheet } from "@/lib/contracts";
 import { useEntries } from "@/lib/client/use-entries";
@@ -51,14 +52,9 @@ function Entries({ sheet, of }: { sheet: Worksheet; of: HistoryOf }) {
         ))}
       </ol>
       {hasNextPage && (
-        <button
-          type="button"
-          className="mt-3 min-h-[44px] w-full rounded-[6px] control t-state"
-          disabled={isFetchingNextPage}
-          onClick={() => void fetchNextPage()}
-        >
+        <Button className="mt-3 w-full" disabled={isFetchingNextPage} onClick={() => void fetchNextPage()}>
           Show older
-        </button>
+        </Button>
       )}
     </>
   );

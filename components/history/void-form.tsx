@@ -1,3 +1,5 @@
+import { Button } from "@/components/ui/button";
+import { TextField } from "@/components/ui/text-field";
 import { useState, type FormEvent } from "react";
 import { AppError, type Entry } from "@/lib/contracts";
 import { newClientKey } from "@/lib/client/new-client-key";
@@ -20,27 +22,18 @@ export function VoidForm({ entry, patientId, onDone }: { entry: Entry; patientId
   };
   return (
     <form onSubmit={send} className="space-y-3 pt-2">
-      <label className="block t-label">
-        Why is it voided?
-        <input
-          className="mt-1 h-[48px] w-full rounded-[6px] px-3 control t-body"
-          value={reason}
-          maxLength={200}
-          required
-          autoFocus
-          onChange={(event) => setReason(event.target.value)}
-        />
-      </label>
+      <TextField
+        label="Why is it voided?"
+        value={reason}
+        maxLength={200}
+        autoFocus
+        onChange={(event) => setReason(event.target.value)}
+      />
       <p className="flex flex-wrap gap-2">
         {usualReasons.map((each) => (
-          <button
-            key={each}
-            type="button"
-            className="min-h-[44px] rounded-[6px] px-3 control t-state"
-            onClick={() => setReason(each)}
-          >
+          <Button key={each} onClick={() => setReason(each)}>
             {each}
-          </button>
+          </Button>
         ))}
       </p>
       <FormFoot

@@ -1,10 +1,7 @@
 import Link from "next/link";
+import { buttonClass } from "@/components/ui/button-class";
 import type { Worksheet } from "@/lib/contracts";
 import { dueInOrder, dueSentence } from "./due-words";
-
-const quiet = "control rounded-[6px] bg-paper px-4 t-state inline-flex items-center justify-center min-h-[44px]";
-const primary =
-  "rounded-[6px] border-[1.5px] border-accent bg-accent px-4 t-state text-on-accent inline-flex items-center justify-center min-h-[44px]";
 
 /** The two ways into the record form; each is shown only to those who may chart through it. */
 export function EntryActions({ sheet }: { sheet: Worksheet }) {
@@ -13,12 +10,12 @@ export function EntryActions({ sheet }: { sheet: Worksheet }) {
   return (
     <>
       {(can.mechanics || can.observations) && (
-        <Link href={`${record}?focus=measurements`} className={quiet}>
+        <Link href={`${record}?focus=measurements`} className={buttonClass("quiet", "bar")}>
           Enter measurements
         </Link>
       )}
       {can.settings && (
-        <Link href={`${record}?focus=settings`} className={primary}>
+        <Link href={`${record}?focus=settings`} className={buttonClass("primary", "bar")}>
           Enter settings
         </Link>
       )}

@@ -37,7 +37,7 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
       <PatientStrip sheet={sheet} hours={hours} actions={<EntryActions sheet={sheet} />} />
       <Connection sheet={sheet} failing={query.failureCount > 0} now={now} />
       <div className="flex desk:min-h-[calc(100dvh-148px)]">
-        <main id="content" className="min-w-0 flex-1 page-margin pb-24 desk:pb-12">
+        <div className="min-w-0 flex-1 page-margin pb-24 desk:pb-12">
           <PhoneSummary sheet={sheet} now={now} />
           <Ladder sheet={sheet} />
           <div className="grid gap-x-4 tablet:grid-cols-[148px_272px_1fr_196px] desk:grid-cols-[178px_292px_1fr_214px] desk:gap-x-6">
@@ -53,7 +53,7 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
               </div>
             </div>
           </div>
-        </main>
+        </div>
         <DueRail sheet={sheet} now={now} onHistory={setHistory} />
       </div>
       <EntryBar sheet={sheet} now={now} />
