@@ -14,6 +14,8 @@ export interface FactBase {
   chartedAt: Instant;
   recordedAt: Instant;
   author: Author;
+  /** V1: a replacement at its original's `chartedAt` keeps the original's place in the order; the fact's own otherwise. */
+  place?: { recordedAt: Instant; id: string } | null;
 }
 
 export type NumericSettings = Partial<Record<Exclude<SettingField, "flowPattern" | "triggerType">, number | null>>;

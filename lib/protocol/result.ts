@@ -79,6 +79,8 @@ export interface Finding {
   freshness: FreshnessWord;
   since: string | null;
   acknowledgement: { by: { id: string; name: string }; until: string; note: string } | null;
+  /** A3: unanswered and of the kind that is sent: from when it counts, and when it is sent; null while away. */
+  escalation?: { from: string; at: string | null } | null;
 }
 
 export interface NextStep {
@@ -123,4 +125,6 @@ export interface Evaluation {
   /** Why the group is what it is, worst first: `{ metric, state }` of the checks that decide it. */
   causes: { metric: DerivedName; state: State; lastState: State | null }[];
   validUntil: string | null;
+  /** S4: place within the group; `compareBeds` orders by it. */
+  rank?: { tier: number; steps: number; overdueSince: string | null };
 }

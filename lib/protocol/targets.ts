@@ -34,6 +34,13 @@ export interface Targets {
   peepTable?: "lower" | "higher" | "none";
   mechanicalPowerJPerMin?: Range | null;
   gasIntervalH?: number | "as-needed" | null;
+  /** O1, S8: the order asks for a measured total PEEP. */
+  totalPeepRequired?: boolean;
+  /** 1:3 or longer is 1/3. */
+  longestInspiratoryToExpiratory?: number;
+  /** Pregnancy: a PaCO2 above this is a *call*. */
+  callAbovePaco2MmHg?: number;
+  proningOnlyAsCall?: boolean;
 }
 
 /**

@@ -1,0 +1,55 @@
+import { isoOf } from "../instant";
+import { isHeldOutside, type Judged } from "../judge/judged";
+import { present } from "../judge/present";
+import type { DerivedName, Finding } from "../result";
+import type { Scene } from "../scene";
+import { answerTo, type Answer } from "./acknowledgement";
+import type { JudgedMetrics } from "./checks";
+import { distanceOf } from "./distance";
+import { escalates, escalationClock } from "./escalation";
+
+/** A1: metrics that an order may limit. */
+const checked: readonly DerivedName[] = [
+  "vtMlPerKg",
+  "plateauCmH2O",
+  "drivingPressureCmH2O",
+  "intrinsicPeepCmH2O",
+  "spo2Percent",
+  "pao2MmHg",
+  "paco2MmHg",
+  "ph",
+  "respiratoryRateTotal",
+  "mechanicalPowerJPerMin",
+];
+
+function presentAnswer(answer: Answer | null): Finding["acknowledgement"] {
+  return answer && { by: answer.fact.author, until: isoOf(answer.until)!, note: answer.fact.note };
+}
+
+function findingOf(scene: Scene, metrics: JudgedMetrics, judged: Judged): Finding {
+  const outside = judged.state === "outside" || isHeldOutside(judged);
+  const answer = outside && !scene.comfort ? answerTo(scene, metrics, judged) : null;
+  const clock = outside && !answer && escalates(scene, metrics, judged) ? escalationClock(scene, judged, null) : null;
+  const { value, lastState, lastValue, limit, since } = present(scene, judged);
+  return {
+    metric: judged.name,
+    state: judged.state ?? "unmeasured",
+    value,
+    lastState,
+    lastValue,
+    limit,
+    distance: distanceOf(judged),
+    freshness: judged.freshness,
+    since,
+    acknowledgement: presentAnswer(answer),
+    escalation: clock && { from: isoOf(clock.from)!, at: isoOf(clock.at) },
+  };
+}
+
+/** A1–A3: one finding for each metric that the order limits. */
+export function findingsOf(scene: Scene, metrics: JudgedMetrics): Finding[] {
+  return checked
+    .map((name) => metrics[name])
+    .filter(({ limit }) => limit !== null)
+    .map((judged) => findingOf(scene, metrics, judged));
+}

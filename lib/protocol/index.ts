@@ -1,0 +1,15 @@
+export { compareToLimit } from "./compare-to-limit";
+export { edgeMargin } from "./edge-margin";
+export { evaluate } from "./evaluate";
+export type * from "./facts";
+export { compareBeds } from "./findings/rank";
+export { noteCodes, type NoteCode } from "./note-codes";
+export { pbwOf, type Pbw } from "./pbw-of";
+export * from "./result";
+export type { EvaluateInput } from "./scene";
+export { settingsInForce, type SettingsInForce, type ValueInForce } from "./settings-in-force";
+export { settingsLeaveOrder, type JudgedSettings, type OrderDeparture } from "./settings-leave-order";
+export { startingSets, targetsFromSet, type StartingSet, type StartingSetName } from "./starting-sets";
+export { distanceTo, sideOf, stateOf, type Side } from "./state-of";
+export type * from "./targets";
+export { policyOf, unitPolicyDefaults, type Policy } from "./unit-policy-defaults";

@@ -1,0 +1,12 @@
+/**
+ * V14: the physiology functions refuse what cannot be; the chart may hold it (exhaled 0, plateau over peak). Such a
+ * number is null, and says so.
+ */
+export function computable(compute: () => number): number | null {
+  try {
+    return compute();
+  } catch (error) {
+    if (error instanceof RangeError) return null;
+    throw error;
+  }
+}

@@ -1,0 +1,147 @@
+import type {
+  AcknowledgementFact,
+  ArdsAssessmentFact,
+  BloodGasFact,
+  Facts,
+  HeightFact,
+  MechanicsFact,
+  ObservationFact,
+  PositionFact,
+  SettingsCheckFact,
+  SettingsFact,
+  TherapyFact,
+} from "../facts";
+import type { Change } from "./change-kinds";
+import { changesPerRow, type ExpiryRow } from "./expiry-rows";
+import { foldSettings, type Snapshot } from "./fold-settings";
+import { holdsOf, isPlateau, type Hold } from "./holds";
+import { itemsInOrder, newestUntil, type Item } from "./item";
+import { positionChanges, therapyChanges } from "./other-changes";
+import { settingChanges } from "./setting-changes";
+import { volumePointsOf, type VolumePoint } from "./volume-points";
+
+type Mechanics = Item<MechanicsFact>;
+type Gas = Item<BloodGasFact>;
+
+/** All that follows from the facts alone, ascending, made once for a facts object. */
+export interface Timeline {
+  snapshots: Snapshot[];
+  settings: Item<SettingsFact>[];
+  settingsChecks: Item<SettingsCheckFact>[];
+  heights: Item<HeightFact>[];
+  positions: Item<PositionFact>[];
+  therapies: Item<TherapyFact>[];
+  acknowledgements: Item<AcknowledgementFact>[];
+  ardsAssessments: Item<ArdsAssessmentFact>[];
+  changes: Record<ExpiryRow, Change[]>;
+  holds: Hold[];
+  /** V8: holds that charted a plateau; in APRV P-high alone. */
+  plateaus: Hold[];
+  volumePoints: VolumePoint[];
+  exhaled: Mechanics[];
+  /** V7: exhaled volume and total rate of one reading, SIMV left out: there exhaled is the mandatory breaths' alone. */
+  exhaledWithRate: Mechanics[];
+  minuteVolumesOrProducts: Mechanics[];
+  /** Spontaneous or exhaled volumes, for RSBI. */
+  breathVolumes: Mechanics[];
+  spontaneous: Mechanics[];
+  minuteVolumes: Mechanics[];
+  peaks: Mechanics[];
+  totalPeeps: Mechanics[];
+  meanPressures: Mechanics[];
+  totalRates: Item<MechanicsFact | ObservationFact>[];
+  spo2: Item<ObservationFact>[];
+  etco2: Item<ObservationFact>[];
+  /** Arterial only: a venous gas never feeds oxygen or CO2 checks. */
+  gases: Gas[];
+  pao2: Gas[];
+  paco2: Gas[];
+  ph: Gas[];
+  /** Every `chartedAt`, ascending: what is charted ahead of `at` changes the answer when its moment comes. */
+  moments: { t: number }[];
+}
+
+function holding<Fact, Field extends keyof Fact>(items: readonly { t: number; fact: Fact }[], field: Field) {
+  return items.filter(({ fact }) => fact[field] !== null && fact[field] !== undefined);
+}
+
+function readings(facts: Facts) {
+  const mechanics = itemsInOrder(facts.mechanics);
+  const observations = itemsInOrder(facts.observations);
+  const rates: Item<MechanicsFact | ObservationFact>[] = [
+    ...(holding(mechanics, "respiratoryRateTotal") as Mechanics[]),
+    ...(holding(observations, "respiratoryRateTotal") as Item<ObservationFact>[]),
+  ];
+  const gases = itemsInOrder(facts.bloodGases).filter(({ fact }) => fact.specimen === "arterial");
+  return {
+    mechanics,
+    observations,
+    exhaled: holding(mechanics, "exhaledTidalVolumeMl") as Mechanics[],
+    spontaneous: holding(mechanics, "spontaneousTidalVolumeMl") as Mechanics[],
+    minuteVolumes: holding(mechanics, "minuteVolumeLPerMin") as Mechanics[],
+    peaks: holding(mechanics, "peakCmH2O") as Mechanics[],
+    totalPeeps: holding(mechanics, "totalPeepCmH2O") as Mechanics[],
+    meanPressures: holding(mechanics, "meanAirwayPressureCmH2O") as Mechanics[],
+    totalRates: rates.sort((a, b) => a.t - b.t),
+    spo2: holding(observations, "spo2Percent") as Item<ObservationFact>[],
+    etco2: holding(observations, "etco2MmHg") as Item<ObservationFact>[],
+    gases,
+    pao2: holding(gases, "pao2MmHg") as Gas[],
+    paco2: holding(gases, "paco2MmHg") as Gas[],
+    ph: holding(gases, "ph") as Gas[],
+  };
+}
+
+function build(facts: Facts): Timeline {
+  const { mechanics, observations, ...measured } = readings(facts);
+  const settings = itemsInOrder(facts.settings);
+  const snapshots = foldSettings(settings);
+  const charted = {
+    settings,
+    settingsChecks: itemsInOrder(facts.settingsChecks),
+    heights: itemsInOrder(facts.heights),
+    positions: itemsInOrder(facts.positions),
+    therapies: itemsInOrder(facts.therapies),
+    acknowledgements: itemsInOrder(facts.acknowledgements),
+    ardsAssessments: itemsInOrder(facts.ardsAssessments),
+  };
+  const changes = [
+    ...settingChanges(snapshots),
+    ...positionChanges(charted.positions),
+    ...therapyChanges(charted.therapies),
+  ].sort((a, b) => a.t - b.t);
+  const moments: { t: number }[] = [...Object.values(charted), mechanics, observations, measured.gases].flat();
+  const isProduct = ({ t, fact }: Mechanics) =>
+    typeof fact.exhaledTidalVolumeMl === "number" &&
+    typeof fact.respiratoryRateTotal === "number" &&
+    !newestUntil(snapshots, t)?.mode.startsWith("SIMV");
+  const holds = holdsOf(mechanics, snapshots);
+  return {
+    ...charted,
+    ...measured,
+    snapshots,
+    changes: changesPerRow(changes),
+    exhaledWithRate: mechanics.filter(isProduct),
+    breathVolumes: mechanics.filter(
+      ({ fact }) => typeof fact.spontaneousTidalVolumeMl === "number" || typeof fact.exhaledTidalVolumeMl === "number",
+    ),
+    minuteVolumesOrProducts: mechanics.filter(
+      (item) => typeof item.fact.minuteVolumeLPerMin === "number" || isProduct(item),
+    ),
+    holds,
+    plateaus: holds.filter(isPlateau),
+    volumePoints: volumePointsOf(snapshots, mechanics),
+    moments: moments.sort((a, b) => a.t - b.t),
+  };
+}
+
+const built = new WeakMap<Facts, Timeline>();
+
+/** The timeline of a facts object, folded on first use. Facts are immutable: give a new object after a change. */
+export function timelineOf(facts: Facts): Timeline {
+  const known = built.get(facts);
+  if (known) return known;
+  const timeline = build(facts);
+  built.set(facts, timeline);
+  return timeline;
+}
