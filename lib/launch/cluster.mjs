@@ -75,7 +75,8 @@ async function startServer({ folder, programs, port, durable, log }) {
   const [command, ...args] = [...(await unprivileged(folder)), join(programs, "postgres"), "-D", folder, ...options];
   const output = await openLog(log);
   try {
-    return start(command, args, { cwd: "/", env: postgresEnvironment(), stdio: ["ignore", output, output] });
+    const stdio = ["ignore", output, output];
+    return start(command, args, { service: true, cwd: "/", env: postgresEnvironment(), stdio });
   } finally {
     closeSync(output);
   }

@@ -1,10 +1,14 @@
 import { existsSync } from "node:fs";
-import { run } from "./processes.mjs";
+import { capture } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
 
 const APT = "/usr/bin/apt-get";
 // Another apt may be at work on a fresh machine; wait for it.
-const APT_OPTIONS = ["-y", "--no-install-recommends", "-o", "DPkg::Lock::Timeout=300"];
+const APT_OPTIONS = ["-y", "--no-install-recommends", "-o", "DPkg::Lock::Timeout=300", "-o", "Dpkg::Use-Pty=0"];
+
+// Stopped half way, dpkg would have to be repaired by hand: it is let finish.
+const apt = (...args) =>
+  capture(APT, args, { env: { ...process.env, DEBIAN_FRONTEND: "noninteractive" }, finish: true });
 
 /** Installs a Debian package as root; anyone else is told what to install. */
 export async function installPackage(name, purpose) {
@@ -14,9 +18,8 @@ export async function installPackage(name, purpose) {
     throw new Refusal(`${purpose} is missing. Install it, then run this again: ${how}.`);
   }
   console.log(`Installing Debian's ${name}.`);
-  const env = { ...process.env, DEBIAN_FRONTEND: "noninteractive" };
-  const options = { env, stdio: ["ignore", "inherit", "inherit"] };
-  await run(APT, ["update", "-qq"], options);
-  const code = await run(APT, ["install", "-qq", ...APT_OPTIONS, name], options);
-  if (code !== 0) throw new Refusal(`Debian's ${name} could not be installed; apt-get says why above.`);
+  const update = await apt("update");
+  const install = await apt("install", ...APT_OPTIONS, name);
+  if (install.code === 0) return;
+  throw new Refusal(`${update.stderr}${install.stdout}${install.stderr}\nDebian's ${name} could not be installed.`);
 }

@@ -1,15 +1,21 @@
-import { startNothingMore, stopAll } from "./processes.mjs";
+import { startNothingMore, stopWork, within } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
+
+// What was stopped under it makes the command fail at once; the time is for its own tidying up.
+const TIDY_MS = 1_000;
 
 const stops = [];
 let ending;
+let command = Promise.resolve();
 
 /** Registers what to stop at the end; the last registered stops first. */
 export function atEnd(stop) {
   stops.push(stop);
 }
 
-async function stopInOrder() {
+async function stopEverything() {
+  // Work under way goes before the services it uses.
+  if (await stopWork()) await within(Promise.allSettled([command]), TIDY_MS);
   for (const stop of stops.reverse()) {
     try {
       await stop();
@@ -17,12 +23,11 @@ async function stopInOrder() {
       console.error(`While stopping: ${error.message}`);
     }
   }
-  await stopAll();
 }
 
 /** Stops everything once, then exits; later calls wait for the first. */
 export function end(code) {
-  ending ??= stopInOrder().then(() => process.exit(code));
+  ending ??= stopEverything().then(() => process.exit(code));
   return ending;
 }
 
@@ -45,7 +50,8 @@ export async function launch(main) {
   let served = false;
   listenForSignals((signal) => (served ? 0 : exitCodes[signal]));
   try {
-    await end(await main({ serving: () => (served = true) }));
+    command = main({ serving: () => (served = true) });
+    await end(await command);
   } catch (error) {
     if (isEnding()) return ending;
     console.error(error instanceof Refusal ? error.message : error);

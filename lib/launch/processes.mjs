@@ -7,16 +7,17 @@ let closed = false;
 
 /**
  * Starts a program in a session of its own, so that Ctrl-C in the terminal reaches the launcher alone and the order
- * of stopping stays the launcher's. `ended` resolves with `{ code, signal }`.
+ * of stopping stays the launcher's. `ended` resolves with `{ code, signal }`. A `service` is stopped by whoever started
+ * it, last; what must `finish` is waited for.
  */
-export function start(command, args, options = {}) {
+export function start(command, args, { service = false, finish = false, ...options } = {}) {
   if (closed) throw new Refusal("Stopping.");
   const child = spawn(command, args, { stdio: "inherit", ...options, detached: true });
   const ended = new Promise((resolve) => {
     child.once("error", (error) => resolve({ code: 127, signal: null, error }));
     child.once("exit", (code, signal) => resolve({ code, signal }));
   });
-  const started = { child, pid: child.pid, ended };
+  const started = { child, pid: child.pid, ended, service, finish };
   running.add(started);
   void ended.then(() => running.delete(started));
   return started;
@@ -53,7 +54,8 @@ function signalGroup(pid, signal) {
   }
 }
 
-function within(promise, milliseconds) {
+/** The promise's value, or 'late' when it takes longer. */
+export function within(promise, milliseconds) {
   let timer;
   const late = new Promise((resolve) => (timer = setTimeout(resolve, milliseconds, "late")));
   return Promise.race([promise, late]).finally(() => clearTimeout(timer));
@@ -69,10 +71,12 @@ export async function stop(started, signal = "SIGTERM", graceMs = 10_000) {
   await started.ended;
 }
 
-/** Ends whatever is still running, and lets nothing start any more. */
-export async function stopAll() {
+/** Stops all that is no service, and lets nothing start any more. Answers whether there was something to stop. */
+export async function stopWork() {
   closed = true;
-  await Promise.all([...running].map((started) => stop(started, "SIGTERM", 5_000)));
+  const work = [...running].filter((started) => !started.service);
+  await Promise.all(work.map((started) => (started.finish ? started.ended : stop(started, "SIGTERM", 5_000))));
+  return work.length > 0;
 }
 
 /** From now on `start` refuses: used between a signal and the end. */

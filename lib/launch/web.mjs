@@ -52,7 +52,7 @@ export async function serve({ command, data, port, url, values, log, print = tru
     String(port),
   ];
   const env = childEnvironment(data, { ...values, [SERVES]: root });
-  const server = start(process.execPath, args, { cwd: root, env, stdio: ["ignore", "pipe", "pipe"] });
+  const server = start(process.execPath, args, { service: true, cwd: root, env, stdio: ["ignore", "pipe", "pipe"] });
   atEnd(() => stop(server, "SIGTERM", 10_000));
   const file = createWriteStream(log, { mode: 0o600 });
   forward(server.child.stdout, file, print);
