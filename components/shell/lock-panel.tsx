@@ -11,11 +11,13 @@ export interface LockPanelProps {
   onUnlock: (password: string) => void;
   onSomeoneElse: () => void;
   busy: boolean;
-  problem?: string;
+  /** Seconds until the next try is allowed; the button counts them down. */
+  waitSeconds?: number;
+  problem?: string | undefined;
 }
 
 /** The page is locked after idling: this person's password, or someone else. What was typed underneath is kept. */
-export function LockPanel({ name, onUnlock, onSomeoneElse, busy, problem }: LockPanelProps) {
+export function LockPanel({ name, onUnlock, onSomeoneElse, busy, waitSeconds = 0, problem }: LockPanelProps) {
   const [password, setPassword] = useState("");
   const submit = (event: FormEvent) => {
     event.preventDefault();
@@ -39,8 +41,14 @@ export function LockPanel({ name, onUnlock, onSomeoneElse, busy, problem }: Lock
           onChange={(event) => setPassword(event.target.value)}
         />
         {problem && <ErrorNote>{problem}</ErrorNote>}
-        <Button type="submit" look="primary" size="save" disabled={busy} className="w-full rounded-[6px]">
-          {busy ? "Unlocking" : "Unlock"}
+        <Button
+          type="submit"
+          look="primary"
+          size="save"
+          disabled={busy || waitSeconds > 0}
+          className="w-full rounded-[6px]"
+        >
+          {waitSeconds > 0 ? `Wait ${waitSeconds} s` : busy ? "Unlocking" : "Unlock"}
         </Button>
         <Button size="entry" onClick={onSomeoneElse} disabled={busy} className="w-full">
           Someone else

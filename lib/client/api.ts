@@ -59,7 +59,8 @@ async function readJson(response: Response): Promise<unknown> {
 
 function errorOf(response: Response, json: unknown): AppError {
   const problem = problemSchema.safeParse(json);
-  if (problem.success) return AppError.fromProblem(problem.data);
+  const wait = response.headers.get("Retry-After");
+  if (problem.success) return AppError.fromProblem(problem.data, wait === null ? {} : { "Retry-After": wait });
   const kind = response.status === 401 ? "not-signed-in" : response.status === 404 ? "not-found" : "internal";
   return new AppError(kind, `The server answered ${response.status} without saying why.`);
 }

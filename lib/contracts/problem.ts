@@ -89,9 +89,9 @@ export class AppError extends Error {
     };
   }
 
-  static fromProblem(problem: Problem): AppError {
+  static fromProblem(problem: Problem, headers: Record<string, string> = {}): AppError {
     const name = problem.type.split("/").at(-1) ?? "";
     const kind = name in problemKinds ? (name as ProblemKind) : "internal";
-    return new AppError(kind, problem.detail, { errors: problem.errors, conflict: problem.conflict });
+    return new AppError(kind, problem.detail, { errors: problem.errors, conflict: problem.conflict, headers });
   }
 }

@@ -1,0 +1,89 @@
+"use client";
+
+import { useQueryClient } from "@tanstack/react-query";
+import { signOut } from "next-auth/react";
+import { Dialog } from "radix-ui";
+import type { ReactNode } from "react";
+import { Banner } from "@/components/ui/banner";
+import { useSessionWatch } from "@/lib/client/use-session-watch";
+import { useSignIn } from "@/lib/client/use-sign-in";
+import { useUnlock } from "@/lib/client/use-unlock";
+import type { Me } from "@/lib/contracts";
+import { DoorFrame } from "./door-frame";
+import { LockPanel } from "./lock-panel";
+import { SignInPanel } from "./sign-in-panel";
+
+const leave = () => void signOut({ callbackUrl: "/sign-in" });
+
+interface SessionGuardProps {
+  me: Me;
+  children: ReactNode;
+}
+
+/**
+ * Stands around every page of a signed-in person. Locked or ended, the door covers the page; what was typed stays
+ * mounted beneath it, and only its own person gets it back.
+ */
+export function SessionGuard({ me, children }: SessionGuardProps) {
+  const client = useQueryClient();
+  const { loss, endsInMinutes, reopen } = useSessionWatch(me.user.id, me.session);
+  const opened = async () => {
+    await reopen();
+    await client.invalidateQueries();
+  };
+  return (
+    <>
+      <div className={loss === null ? "contents" : "invisible contents"}>
+        {endsInMinutes !== null && <EndsSoon minutes={endsInMinutes} />}
+        {children}
+      </div>
+      {loss === "locked" && (
+        <Door title="Locked">
+          <Locked name={me.user.name} onOpened={opened} />
+        </Door>
+      )}
+      {loss === "not-signed-in" && (
+        <Door title="Signed out">
+          <Ended onOpened={opened} />
+        </Door>
+      )}
+    </>
+  );
+}
+
+/** Over everything, dialogs of the page included; only signing in leads out of it. */
+function Door({ title, children }: { title: string; children: ReactNode }) {
+  return (
+    <Dialog.Root open>
+      <Dialog.Portal>
+        <Dialog.Content
+          aria-describedby={undefined}
+          onEscapeKeyDown={(event) => event.preventDefault()}
+          onInteractOutside={(event) => event.preventDefault()}
+          className="fixed inset-0 z-[100] overflow-y-auto bg-paper"
+        >
+          <Dialog.Title className="sr-only">{title}</Dialog.Title>
+          <DoorFrame>{children}</DoorFrame>
+        </Dialog.Content>
+      </Dialog.Portal>
+    </Dialog.Root>
+  );
+}
+
+function Locked({ name, onOpened }: { name: string; onOpened: () => Promise<void> }) {
+  const { submit, ...form } = useUnlock(onOpened);
+  return <LockPanel name={name} onUnlock={submit} onSomeoneElse={leave} {...form} />;
+}
+
+function Ended({ onOpened }: { onOpened: () => Promise<void> }) {
+  const { submit, ...form } = useSignIn(onOpened);
+  return <SignInPanel title="Your session has ended" onSignIn={submit} {...form} />;
+}
+
+function EndsSoon({ minutes }: { minutes: number }) {
+  return (
+    <Banner title={`This session ends in ${minutes} min`}>
+      Sign-in is asked again then, twelve hours after the last. What is typed stays on this page.
+    </Banner>
+  );
+}
