@@ -145,3 +145,10 @@ export class Bedside {
 }
 
 export const conflictOf = ({ json }: Answered) => json.conflict as FieldConflict[] | undefined;
+
+/** The entry of a kind that an answer filed; its first one where no kind is named. */
+export function idOf({ entries }: ChartAnswer, kind?: string): string {
+  const entry = entries.find((filed) => kind === undefined || filed.kind === kind);
+  if (!entry) throw new Error(`the answer filed no ${kind ?? "entry"}`);
+  return entry.id;
+}

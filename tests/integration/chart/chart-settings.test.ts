@@ -2,7 +2,7 @@ import { randomUUID } from "node:crypto";
 import { beforeEach, describe, expect, it } from "vitest";
 import { AuditEvent, ChartEntry, SettingChange } from "@/db/models";
 import { paths } from "../http/call";
-import { Bedside, conflictOf, minutesAgo, pressureControl, shown, volumeControl } from "./bedside";
+import { Bedside, conflictOf, idOf, minutesAgo, pressureControl, shown, volumeControl } from "./bedside";
 
 let bedside: Bedside;
 
@@ -39,7 +39,7 @@ describe("first settings", () => {
     const answer = await bedside.charted("settings", { ...volumeControl, fio2: 0.57, basedOn: null, chartedAt });
     const [entry] = answer.entries;
     expect(answer.entries).toEqual([{ id: entry?.id, kind: "settings" }]);
-    const row = await SettingChange.findByPk(entry?.id, { rejectOnEmpty: true });
+    const row = await SettingChange.findByPk(entry?.id ?? "", { rejectOnEmpty: true });
     expect(row).toMatchObject({ mode: "A/C-VC", tidalVolumeMl: 420, fio2Percent: 57, flowLPerMin: null });
     const { settings } = await bedside.worksheet();
     expect(settings?.fio2).toEqual({
@@ -69,7 +69,7 @@ describe("a change of settings", () => {
     await bedside.settled();
     const basedOn = shown(volumeControl, "peepCmH2O");
     const answer = await bedside.charted("settings", { peepCmH2O: 12, basedOn });
-    const row = await SettingChange.findByPk(answer.entries[0]?.id, { rejectOnEmpty: true });
+    const row = await SettingChange.findByPk(idOf(answer), { rejectOnEmpty: true });
     expect(row).toMatchObject({ mode: null, peepCmH2O: 12, tidalVolumeMl: null, fio2Percent: null });
     expect(answer.worksheet.settings).toMatchObject({
       peepCmH2O: { value: 12, entryId: row.entryId },
@@ -276,8 +276,8 @@ describe("out of the order", () => {
     const refused = await bedside.chart("settings", change);
     expect(refused.status).toBe(422);
     expect(paths(refused)).toEqual(["reason"]);
-    const { entries } = await bedside.charted("settings", { ...change, reason: "pH under 7.15" });
-    const row = await SettingChange.findByPk(entries[0]?.id, { rejectOnEmpty: true });
+    const answer = await bedside.charted("settings", { ...change, reason: "pH under 7.15" });
+    const row = await SettingChange.findByPk(idOf(answer), { rejectOnEmpty: true });
     expect(row.reason).toBe("pH under 7.15");
     expect((await bedside.history()).entries[0]).toMatchObject({ reason: "pH under 7.15", correction: null });
   });
