@@ -15,18 +15,15 @@ interface ClinicalPageProps {
   children: ReactNode;
 }
 
-const roleWords = { therapist: "RT", intensivist: "intensivist", nurse: "RN" } as const;
-
 /** A clinical screen in its frame: who is signed in, the unit's clock, and the way to the patient last seen. */
 export function ClinicalPage({ me, here, unit, now, patientId, children }: ClinicalPageProps) {
   const lastSeen = useLastSeenPatient(me.user.id, patientId);
-  const role = me.units.find(({ id }) => id === unit.id)?.role;
   const bar = {
     here,
     unit,
     now,
     worksheetHref: lastSeen === null ? null : `/patients/${lastSeen}`,
-    userName: role ? `${me.user.name}, ${roleWords[role]}` : me.user.name,
+    userName: me.user.name,
   };
   return <PageFrame bar={bar}>{children}</PageFrame>;
 }
