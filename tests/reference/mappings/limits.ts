@@ -1,4 +1,4 @@
-import { compareToLimit } from "@/lib/protocol/compare-to-limit";
+import { compareToLimit } from "@/lib/protocol";
 import type { Inputs } from "../published-values";
 import { asNumber, run, type MappedRun } from "./mapping";
 
