@@ -51,11 +51,11 @@ export function MiniWithoutBar({ scale, lowWater, reading, limit }: MiniWithoutB
   }
 }
 
-/** About 97 px hold all three words. */
+/** About 90 px hold all three words. */
 function NoPlateau({ scale, from, limit }: { scale: MiniScale; from: number; limit: number | null }) {
   const x = scale.x(from) + 10;
   const room = (limit === null ? scale.width : scale.x(limit)) - x;
-  return <Words x={x} words={room < 97 ? "no plateau" : "no plateau yet"} unmeasured />;
+  return <Words x={x} words={room < 90 ? "no plateau" : "no plateau yet"} unmeasured />;
 }
 
 function Words({ x, words, unmeasured = false }: { x: number; words: string; unmeasured?: boolean }) {

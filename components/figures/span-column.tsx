@@ -1,4 +1,3 @@
-import { pressureText } from "./pressure-text";
 import { spanTopCmH2O, type SpanMetrics } from "./span-metrics";
 import type { LowWater } from "./span-reading";
 
@@ -22,7 +21,6 @@ export function SpanColumn({ metrics, lowWater }: { metrics: SpanMetrics; lowWat
       {lowWater && (
         <rect
           data-part="low-water"
-          data-words={`${lowWater.word} ${pressureText(level)}`}
           x={column.left}
           y={y(level)}
           width={width}

@@ -13,7 +13,7 @@ interface DemoPeopleProps {
 /** The demo's invented people; one tap fills the form. */
 export function DemoPeople({ people, filled, onFill }: DemoPeopleProps) {
   return (
-    <section aria-labelledby="demo-people" className="mt-6">
+    <section aria-labelledby="demo-people" className="mt-4 desk:mt-6">
       <h2 id="demo-people" className="border-b border-hair pb-1.5 t-head">
         Demo people <span className="ml-1 text-muted t-label">one tap fills the form</span>
       </h2>

@@ -18,14 +18,14 @@ export function DoorFrame({ children }: { children: ReactNode }) {
           <br />
           the smallest rise.
         </p>
-        <p className="mt-3 mb-4 max-w-[30ch] text-muted t-body tablet:max-w-[44ch] tablet:text-[18px]">
+        <p className="mt-3 mb-4 max-w-[30ch] text-muted t-body tablet:max-w-[400px] tablet:text-[18px]">
           A bedside worksheet for ventilator settings and lung protection.
         </p>
         <NeapDrawing className="mt-auto hidden max-w-[708px] tablet:block" />
       </section>
-      <section className="flex flex-col justify-center border-hair bg-surface px-4 py-6 tablet:w-[428px] tablet:border-l tablet:px-11 desk:w-[602px] desk:px-[84px]">
+      <section className="flex flex-col justify-center border-hair bg-surface px-4 py-6 tablet:w-[428px] tablet:border-l tablet:px-11 tablet:py-3 desk:w-[602px] desk:px-[84px]">
         {children}
-        <div className="mt-7 border-t-2 border-ink pt-3 text-ink t-small">
+        <div className="mt-5 border-t-2 border-ink pt-3 text-ink t-small">
           <p className="font-[640]">{cautionFull.lead}</p>
           <p>{cautionFull.rest}</p>
         </div>

@@ -41,13 +41,7 @@ export function LockPanel({ name, onUnlock, onSomeoneElse, busy, waitSeconds = 0
           onChange={(event) => setPassword(event.target.value)}
         />
         {problem && <ErrorNote>{problem}</ErrorNote>}
-        <Button
-          type="submit"
-          look="primary"
-          size="save"
-          disabled={busy || waitSeconds > 0}
-          className="w-full rounded-[6px]"
-        >
+        <Button type="submit" look="primary" size="door" disabled={busy || waitSeconds > 0} className="w-full">
           {waitSeconds > 0 ? `Wait ${waitSeconds} s` : busy ? "Unlocking" : "Unlock"}
         </Button>
         <Button size="entry" onClick={onSomeoneElse} disabled={busy} className="w-full">

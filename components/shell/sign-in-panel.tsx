@@ -43,7 +43,7 @@ export function SignInPanel({ onSignIn, busy, waitSeconds = 0, problem, title = 
   return (
     <>
       <h1 className="text-[28px] leading-tight font-[700]">{title}</h1>
-      <form noValidate onSubmit={handleSubmit(onSignIn)} className="mt-3 flex flex-col gap-4">
+      <form noValidate onSubmit={handleSubmit(onSignIn)} className="mt-3 flex flex-col gap-3 desk:gap-4">
         <TextField
           label="E-mail"
           type="email"
@@ -59,13 +59,7 @@ export function SignInPanel({ onSignIn, busy, waitSeconds = 0, problem, title = 
           {...register("password")}
         />
         {problem && <ErrorNote>{problem}</ErrorNote>}
-        <Button
-          type="submit"
-          look="primary"
-          size="save"
-          disabled={busy || waitSeconds > 0}
-          className="w-full rounded-[6px]"
-        >
+        <Button type="submit" look="primary" size="door" disabled={busy || waitSeconds > 0} className="w-full">
           {buttonWords(busy, waitSeconds)}
         </Button>
       </form>

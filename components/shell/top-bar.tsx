@@ -55,7 +55,9 @@ export function TopBar({ here, worksheetHref, unit, userName, now, clinical = tr
       </nav>
       <div className="ml-auto flex min-w-0 items-center gap-3 tablet:gap-4 desk:gap-6">
         {unit && (
-          <span className="truncate text-[15px] text-muted tablet:hidden desk:inline">
+          <span
+            className={`truncate text-[15px] text-muted tablet:hidden desk:inline ${here === "beds" ? "" : "max-tablet:hidden"}`}
+          >
             {unit.name}
             {unit.shift && <span className="hidden desk:inline">, {unit.shift}</span>}
           </span>

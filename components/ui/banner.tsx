@@ -10,9 +10,11 @@ export interface BannerProps {
 export function Banner({ title, children, actions }: BannerProps) {
   return (
     <section role="status" className="flex gap-4 border-b border-hair bg-unm-soft px-4 py-4 tablet:px-6">
-      <svg aria-hidden="true" width="10" height="100%" className="min-h-[52px] shrink-0 self-stretch overflow-hidden">
-        <line x1="5" x2="5" y1="0" y2="100%" stroke="var(--unm)" strokeWidth="10" strokeDasharray="10 6" />
-      </svg>
+      <div aria-hidden="true" className="relative w-2.5 shrink-0">
+        <svg className="absolute inset-0 h-full w-full">
+          <line x1="5" x2="5" y1="0" y2="100%" stroke="var(--unm)" strokeWidth="10" strokeDasharray="10 6" />
+        </svg>
+      </div>
       <div className="min-w-0 flex-1">
         <h2 className="text-ink t-title">{title}</h2>
         {children && <div className="text-ink t-body">{children}</div>}

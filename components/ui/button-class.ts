@@ -1,5 +1,5 @@
 export type ButtonLook = "primary" | "quiet" | "dashed";
-export type ButtonSize = "control" | "bar" | "entry" | "save";
+export type ButtonSize = "control" | "bar" | "entry" | "save" | "door";
 
 const looks: Record<ButtonLook, string> = {
   primary: "bg-accent text-on-accent border-[1.5px] border-accent",
@@ -12,6 +12,7 @@ const sizes: Record<ButtonSize, string> = {
   bar: "min-h-12 px-4 text-[15px] rounded-[6px]",
   entry: "min-h-14 px-4 text-[16px] rounded-[8px]",
   save: "min-h-16 px-6 text-[18px] rounded-[10px]",
+  door: "min-h-14 px-6 text-[18px] rounded-[6px] desk:min-h-16",
 };
 
 /** For what looks like a button and is a link. */
