@@ -52,7 +52,7 @@ export default defineConfig({
           include: ["tests/faults/**/*.test.ts"],
           // Each starts the whole application; two at once only make both slow.
           fileParallelism: false,
-          testTimeout: 120_000,
+          testTimeout: 180_000,
           hookTimeout: 120_000,
         },
       },

@@ -1,7 +1,7 @@
 import { existsSync } from "node:fs";
 import { readFile, rm, writeFile } from "node:fs/promises";
 import { join } from "node:path";
-import { refuseWhileServed, withCheckoutLock } from "./checkout.mjs";
+import { refuseWhileBuildUsed, withCheckoutLock } from "./checkout.mjs";
 import { childEnvironment } from "./child-environment.mjs";
 import { capture } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
@@ -31,7 +31,7 @@ export async function ensureBuilt(root, data) {
   await withCheckoutLock(root, async () => {
     const hash = await sourceHash(root);
     if (await isFresh(root, hash)) return;
-    refuseWhileServed(root, "The sources changed");
+    refuseWhileBuildUsed(root);
     await build(root, data, hash);
   });
 }

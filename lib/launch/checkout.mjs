@@ -3,8 +3,14 @@ import { takeLock } from "./lock.mjs";
 import { Refusal } from "./refusal.mjs";
 import { hasVariable, processesWhere } from "./system-processes.mjs";
 
-/** Carried by a server that reads node_modules and the build of a checkout. */
-export const SERVES = "NEAPTIDE_SERVES_FROM";
+const USES_PACKAGES = "NEAPTIDE_USES_PACKAGES_OF";
+const USES_BUILD = "NEAPTIDE_USES_BUILD_OF";
+
+/** Variables by which other launchers see what a server reads. `next dev` builds in a folder of its own. */
+export const usesOf = (root, command) => ({
+  [USES_PACKAGES]: root,
+  ...(command === "start" ? { [USES_BUILD]: root } : {}),
+});
 
 const WAIT_MS = 15 * 60_000;
 
@@ -26,10 +32,13 @@ export async function withCheckoutLock(root, change) {
   }
 }
 
-/** Changing files under a running server would break it, so that is refused. */
-export function refuseWhileServed(root, why) {
-  if (processesWhere((pid) => hasVariable(pid, SERVES, root)).length === 0) return;
+// Changing files under a running server would break it.
+function refuseWhileUsed(root, variable, what) {
+  if (processesWhere((pid) => hasVariable(pid, variable, root)).length === 0) return;
   throw new Refusal(
-    `${why} since the running server of this checkout started. Stop that server first, then run this again.`,
+    `${what} changed since the running server of this checkout started. Stop that server first, then run this again.`,
   );
 }
+
+export const refuseWhilePackagesUsed = (root) => refuseWhileUsed(root, USES_PACKAGES, "The list of packages");
+export const refuseWhileBuildUsed = (root) => refuseWhileUsed(root, USES_BUILD, "The sources");

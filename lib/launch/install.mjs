@@ -2,7 +2,7 @@ import { existsSync } from "node:fs";
 import { readFile } from "node:fs/promises";
 import { join } from "node:path";
 import { childEnvironment } from "./child-environment.mjs";
-import { refuseWhileServed, withCheckoutLock } from "./checkout.mjs";
+import { refuseWhilePackagesUsed, withCheckoutLock } from "./checkout.mjs";
 import { run } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
 
@@ -37,7 +37,7 @@ export async function ensureInstalled(folder, data) {
   if (await installMatchesLock(folder)) return;
   await withCheckoutLock(folder, async () => {
     if (await installMatchesLock(folder)) return;
-    refuseWhileServed(folder, "The packages changed");
+    refuseWhilePackagesUsed(folder);
     console.log("Installing packages.");
     const [command, ...args] = [...npm(), "ci", "--include=dev", "--no-audit", "--no-fund", "--loglevel=error"];
     const code = await run(command, args, {

@@ -2,7 +2,7 @@ import { createWriteStream } from "node:fs";
 import { join } from "node:path";
 import { createInterface } from "node:readline";
 import { setTimeout as sleep } from "node:timers/promises";
-import { SERVES } from "./checkout.mjs";
+import { usesOf } from "./checkout.mjs";
 import { childEnvironment } from "./child-environment.mjs";
 import { atEnd } from "./lifetime.mjs";
 import { start, stop } from "./processes.mjs";
@@ -51,7 +51,7 @@ export async function serve({ command, data, port, url, values, log, print = tru
     "-p",
     String(port),
   ];
-  const env = childEnvironment(data, { ...values, [SERVES]: root });
+  const env = childEnvironment(data, { ...values, ...usesOf(root, command) });
   const server = start(process.execPath, args, { service: true, cwd: root, env, stdio: ["ignore", "pipe", "pipe"] });
   atEnd(() => stop(server, "SIGTERM", 10_000));
   const file = createWriteStream(log, { mode: 0o600 });
