@@ -31,14 +31,19 @@ const alsoWanted: Partial<Record<EntryKind, string[]>> = {
   mechanics: ["d.hold IN ('relaxed', 'not-possible')", "d.hold = 'relaxed' AND d.plateau_cm_h2o IS NOT NULL"],
 };
 
+/**
+ * Of each field the newest entry before the window, found in one pass over what is older. A probe for every field made
+ * the planner take longer than the reading itself.
+ */
 function newestEarlier(kind: (typeof readingKinds)[number]): string {
   const { table, columnOf } = detailTables[kind];
   const wanted = [...columnOf.values()].map((column) => `d.${column} IS NOT NULL`).concat(alsoWanted[kind] ?? []);
-  const probes = wanted.map(
-    (condition) => `(SELECT ${chosen} FROM chart_entries e JOIN ${table} d ON d.entry_id = e.id
-      WHERE e.episode_id = ep.id AND e.kind = '${kind}' AND e.charted_at <= w.since AND ${condition} AND ${standing} ${newestFirst} LIMIT 1)`,
-  );
-  return probes.join(" UNION ");
+  return `(WITH earlier AS (
+      SELECT ${chosen}, row_number() OVER (${newestFirst}) AS place, ARRAY[${wanted.join(", ")}] AS holds
+      FROM chart_entries e JOIN ${table} d ON d.entry_id = e.id
+      WHERE e.episode_id = ep.id AND e.kind = '${kind}' AND e.charted_at <= w.since AND ${standing}
+    ) SELECT id, kind, charted_at FROM earlier WHERE place IN (
+      SELECT min(place) FROM earlier CROSS JOIN LATERAL unnest(holds) WITH ORDINALITY AS h(held, field) WHERE h.held GROUP BY h.field))`;
 }
 
 const readings = `
