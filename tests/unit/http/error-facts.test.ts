@@ -9,7 +9,9 @@ describe("what the log says of an error", () => {
       constraint: "patients_hospital_mrn_uq",
       sql: "INSERT INTO patients VALUES ('Doe, Jane')",
     });
-    const facts = errorFacts(new UniqueConstraintError({ parent, message: "Doe, Jane", fields: { name: "Doe, Jane" } }));
+    const facts = errorFacts(
+      new UniqueConstraintError({ parent, message: "Doe, Jane", fields: { name: "Doe, Jane" } }),
+    );
     expect(facts).toMatchObject({ code: "23505", constraint: "patients_hospital_mrn_uq" });
     expect(JSON.stringify(facts)).not.toContain("Doe");
   });
