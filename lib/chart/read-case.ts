@@ -17,8 +17,9 @@ export interface Case {
 
 /** The order standing, else the unit's default. */
 export function targetsOf(unit: UnitWithPolicy, order: EpisodeRow["order"]): Targets {
-  if (!order) return { ...unit.defaultTargets, origin: "default" };
-  return { ...order.targets, origin: "order", recordedAt: new Date(order.recordedAt).toISOString() };
+  const conditions: Targets["conditions"] = [];
+  if (!order) return { conditions, ...unit.defaultTargets, origin: "default" };
+  return { conditions, ...order.targets, origin: "order", recordedAt: new Date(order.recordedAt).toISOString() };
 }
 
 export async function readCase(

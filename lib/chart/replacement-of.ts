@@ -1,6 +1,13 @@
 import type { Ctx } from "@/lib/access/context";
 import type { PatientRow } from "@/lib/access/granted";
-import { AppError, replacementSchemaOf, type Issue, type MechanicsValues, type SettingsValues } from "@/lib/contracts";
+import {
+  AppError,
+  issuesOf,
+  replacementSchemaOf,
+  type Issue,
+  type MechanicsValues,
+  type SettingsValues,
+} from "@/lib/contracts";
 import type { Facts } from "@/lib/protocol";
 import { chartedMoment, type ChartedMoment } from "./charted-moment";
 import { modeIssues, pressureIssues, refuseIssues, settingsAfter } from "./judge-entry";
@@ -22,7 +29,7 @@ function parsed({ kind }: EntryRow, entry: unknown): { chartedAt: string } & Rec
   const result = replacementSchemaOf(kind).safeParse(entry);
   if (result.success) return result.data;
   throw new AppError("validation-failed", "Some values cannot be accepted.", {
-    errors: atEntry(result.error.issues.map(({ path, message }) => ({ path: path.map(String).join("."), message }))),
+    errors: atEntry(issuesOf(result.error)),
   });
 }
 

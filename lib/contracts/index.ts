@@ -1,4 +1,5 @@
 export * from "./problem";
+export * from "./issues-of";
 export * from "./fields";
 export * from "./field-words";
 export * from "./settings";

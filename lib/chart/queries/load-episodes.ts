@@ -13,7 +13,7 @@ export interface EpisodeRow {
   intubatedAt: Date;
   endedAt: Date | null;
   pauses: { from: string; until: string | null }[];
-  order: { targets: Omit<Targets, "origin">; recordedAt: string; author: Author } | null;
+  order: { targets: Partial<Omit<Targets, "origin">>; recordedAt: string; author: Author } | null;
 }
 
 const pauses = `

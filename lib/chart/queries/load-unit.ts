@@ -13,7 +13,7 @@ export interface UnitWithPolicy {
   nursesSetVentilators: boolean;
   intervals: Partial<UnitIntervals>;
   steps: Partial<UnitSteps>;
-  defaultTargets: Omit<Targets, "origin">;
+  defaultTargets: Partial<Omit<Targets, "origin">>;
 }
 
 /** The newest policy recorded by then; a moment before the unit's first policy is judged by that first one. */
