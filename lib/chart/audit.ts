@@ -12,9 +12,18 @@ interface Change {
   newValues?: object;
 }
 
-function common({ actor, requestId }: Ctx, row: UnitRow & Partial<PatientRow>) {
+function common({ actor, now, requestId }: Ctx, row: UnitRow & Partial<PatientRow>) {
   const { hospitalId, unitId, patientId = null } = row;
-  return { actorId: actor.userId, requestId, hospitalId, unitId, patientId, oldValues: null, submissionId: null };
+  return {
+    recordedAt: now,
+    actorId: actor.userId,
+    requestId,
+    hospitalId,
+    unitId,
+    patientId,
+    oldValues: null,
+    submissionId: null,
+  };
 }
 
 /** One line for what was filed, in the transaction that files it. */

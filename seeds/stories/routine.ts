@@ -12,7 +12,10 @@ interface Round {
   observations: ObservationsValues;
 }
 
+/** A day back and more the story is told in wider steps: seeding stays short. */
+const RECENT_HOURS = 24;
 const EVERY_HOURS = 4;
+const EVERY_HOURS_EARLIER = 8;
 
 /** Small steps up and down, the same at every seeding: a chart of real readings is never flat. */
 const sway = [0, 1, 0, -1, 1, 0, -1] as const;
@@ -40,17 +43,27 @@ function roundAt(hoursAgo: number, round: number, { therapist, nurse, mechanics,
     systolicMmHg: 4 * swayOf(round, 6),
     mapMmHg: 2 * swayOf(round, 6),
   });
+  const between = {
+    hoursAgo: hoursAgo - EVERY_HOURS / 2,
+    by: nurse,
+    observations: moved(observations, { heartRate: -2 }),
+  };
   return [
     { hoursAgo, by: therapist, mechanics: reading, check: true },
     { hoursAgo: hoursAgo - 0.2, by: nurse, observations: seen },
-    { hoursAgo: hoursAgo - EVERY_HOURS / 2, by: nurse, observations: moved(observations, { heartRate: -2 }) },
+    ...(hoursAgo > RECENT_HOURS ? [] : [between]),
   ];
 }
 
-/** Every four hours the therapist measures and checks; every two hours the nurse notes what the monitor shows. */
+function timesOf({ from, to }: Round): number[] {
+  const times: number[] = [];
+  for (let hoursAgo = from; hoursAgo >= to; hoursAgo -= hoursAgo > RECENT_HOURS ? EVERY_HOURS_EARLIER : EVERY_HOURS) {
+    times.push(hoursAgo);
+  }
+  return times;
+}
+
+/** The therapist measures and checks, the nurse notes what the monitor shows, then and in between. */
 export function rounds(plan: Round): StoryEvent[] {
-  const count = Math.floor((plan.from - plan.to) / EVERY_HOURS) + 1;
-  return Array.from({ length: count }, (_, round) => plan.from - round * EVERY_HOURS).flatMap((hoursAgo, round) =>
-    roundAt(hoursAgo, round, plan),
-  );
+  return timesOf(plan).flatMap((hoursAgo, round) => roundAt(hoursAgo, round, plan));
 }
