@@ -25,7 +25,7 @@ const exists = (path) => stat(path).then(Boolean, () => false);
 export const postgresEnvironment = () => ({ PATH: process.env.PATH, LC_ALL: "C.UTF-8", TZ: "UTC" });
 
 /** Ends a server that an earlier launcher left behind on this folder, and its pid file. */
-export async function endOrphanedServer(folder) {
+async function endOrphanedServer(folder) {
   const orphans = processesWhere((pid) => {
     const [program = "", ...args] = commandLine(pid);
     return basename(program) === "postgres" && args.includes(folder);

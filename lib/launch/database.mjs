@@ -2,7 +2,7 @@ import { secret } from "./secrets.mjs";
 import { runSql } from "./sql.mjs";
 
 export const DATABASE = "neaptide";
-export const OWNER_ROLE = "neaptide_owner";
+const OWNER_ROLE = "neaptide_owner";
 export const APP_ROLE = "neaptide_app";
 
 const loginRole = (name, password, abilities) => `

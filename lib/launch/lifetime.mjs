@@ -26,12 +26,12 @@ async function stopEverything() {
 }
 
 /** Stops everything once, then exits; later calls wait for the first. */
-export function end(code) {
+function end(code) {
   ending ??= stopEverything().then(() => process.exit(code));
   return ending;
 }
 
-export const isEnding = () => ending !== undefined;
+const isEnding = () => ending !== undefined;
 
 const exitCodes = { SIGINT: 130, SIGTERM: 143, SIGHUP: 129 };
 

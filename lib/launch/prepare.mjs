@@ -15,8 +15,6 @@ export async function localValues(mode, { data, url, databaseUrl }) {
     DATABASE_URL: databaseUrl,
     NEXTAUTH_SECRET: await secret(data, "nextauth"),
     NEXTAUTH_URL: url,
-    // The address typed decides where sign-in returns to, so that http://localhost works beside 127.0.0.1.
-    AUTH_TRUST_HOST: "true",
   };
 }
 

@@ -17,7 +17,7 @@ export const commandLine = (pid) => read(pid, "cmdline").split("\0").filter(Bool
 export const hasVariable = (pid, name, value) => read(pid, "environ").split("\0").includes(`${name}=${value}`);
 
 /** A zombie is dead: it only waits for its parent to notice. */
-export function isAlive(pid) {
+function isAlive(pid) {
   const stat = read(pid, "stat");
   return stat !== "" && !/^\d+ \(.*\) [ZX]/s.test(stat);
 }
