@@ -58,9 +58,11 @@ const writers: Partial<Record<string, (input: Inputs) => string>> = {
 };
 
 /** The sum behind a number with this patient's values, as one reads it aloud: '27 − 12'. */
-export function arithmeticOf(name: string, derived: Derived): string {
+export function arithmeticOf(name: string, derived: Derived, pbwKg: number | null): string {
   const writer = writers[name];
   if (!writer || derived.inputs.length === 0) return "";
-  const text = writer((input) => derived.inputs.find(({ name: each }) => each === input)?.value ?? null);
+  const text = writer((input) =>
+    input === "pbwKg" ? pbwKg : (derived.inputs.find(({ name: each }) => each === input)?.value ?? null),
+  );
   return text.includes("?") ? "" : text;
 }

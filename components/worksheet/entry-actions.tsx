@@ -28,9 +28,9 @@ export function EntryBar({ sheet, now }: { sheet: Worksheet; now: number }) {
   const due = dueInOrder(sheet.due, now);
   const words = due.slice(0, 2).map((each) => dueSentence(each, now, sheet.unit.timeZone));
   return (
-    <div className="sticky bottom-0 z-10 flex min-h-[72px] items-center gap-3 border-t border-hair bg-surface page-margin py-2 desk:hidden">
+    <div className="sticky bottom-0 z-10 flex min-h-[72px] items-center gap-3 border-t border-hair bg-surface page-margin py-2 tablet:bottom-6 desk:hidden">
       <p className="mr-auto t-head max-tablet:hidden">{words.length > 0 ? words.join(", ") : "Nothing is due"}</p>
-      <div className="flex gap-2.5 max-tablet:w-full max-tablet:*:flex-1">
+      <div className="flex gap-2.5 max-tablet:w-full max-tablet:*:flex-1 max-tablet:*:px-2">
         <EntryActions sheet={sheet} />
       </div>
     </div>

@@ -23,3 +23,12 @@ export function freshnessOf(
     ...(chartedAt && { age: durationText({ minutes: (clock.now - Date.parse(chartedAt)) / 60_000 }) }),
   };
 }
+
+/** 'HH:MM' of a value that was last outside and is not measured since (it stays told until a fresh one is inside). */
+export function lastOutsideTime(
+  { value, lastState, chartedAt }: Pick<Derived, "value" | "lastState" | "chartedAt">,
+  timeZone: string,
+): string | undefined {
+  if (value !== null || lastState !== "outside" || chartedAt === null) return undefined;
+  return timeOfDay({ at: chartedAt, timeZone });
+}

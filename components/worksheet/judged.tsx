@@ -7,15 +7,21 @@ type JudgedProps = Pick<Derived, "value" | "lastValue" | "lastState" | "limit"> 
   metric: TrackMetric;
   name: string;
   state: NonNullable<Derived["state"]>;
-  trackWidth: number;
+  /** Of the track, px: below 1200, and from there on. */
+  widths: readonly [number, number];
 };
 
 /** A number against its limits: track, then word. The word stands in a slot of its own so that tracks line up. */
-export function Judged({ trackWidth, ...track }: JudgedProps) {
+export function Judged({ widths: [narrow, wide], ...track }: JudgedProps) {
   if (!track.limit || track.state === "not-asked") return null;
   return (
     <span className="ml-auto flex items-center gap-3">
-      <RangeTrack {...track} limit={track.limit} width={trackWidth} />
+      <span className="desk:hidden">
+        <RangeTrack {...track} limit={track.limit} width={narrow} />
+      </span>
+      <span className="max-desk:hidden">
+        <RangeTrack {...track} limit={track.limit} width={wide} />
+      </span>
       <span className="w-[86px]">
         <StateWord state={track.state} />
       </span>

@@ -64,7 +64,7 @@ function MeasuredCell({
       ) : (
         <>
           <SheetNumber text={text} unit={row.unit} />
-          {judged?.state && <Judged {...judged} name={row.label} state={judged.state} trackWidth={72} />}
+          {judged?.state && <Judged {...judged} name={row.label} state={judged.state} widths={[60, 72]} />}
         </>
       )}
     </SheetCell>

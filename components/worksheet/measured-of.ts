@@ -2,7 +2,7 @@ import { trackDomains, type TrackMetric } from "@/components/figures/track-domai
 import type { Derived, Value, Worksheet } from "@/lib/contracts";
 import type { FreshnessProps } from "@/components/figures/freshness";
 import { displayNumber, timeOfDay } from "@/lib/format";
-import { freshnessOf, type Reading } from "./freshness-of";
+import { freshnessOf, lastOutsideTime, type Reading } from "./freshness-of";
 import { noteWords } from "./note-words";
 import type { MeasuredRow } from "./rows";
 
@@ -47,7 +47,7 @@ export function measuredOf(sheet: Worksheet, row: MeasuredRow, now: number): Mea
     freshness: freshnessOf(reading, { now, timeZone }),
     was: value === null && last !== null && lastAt !== null ? `was ${write(last)} at ${lastAt}` : null,
     everCharted: charted !== undefined || last !== null,
-    lastOutsideAt: value === null && derived?.lastState === "outside" ? lastAt : null,
+    lastOutsideAt: (derived && lastOutsideTime(derived, timeZone)) ?? null,
     notAsked: derived?.state === "not-asked",
     note: derived && derived.value === null ? noteWords(derived.notes) : null,
     judged:

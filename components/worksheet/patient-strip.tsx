@@ -1,6 +1,5 @@
 import type { ReactNode } from "react";
 import { Quantity } from "@/components/figures/quantity";
-import { DemoChip } from "@/components/shell/demo-chip";
 import type { Worksheet } from "@/lib/contracts";
 import { calendarDate, displayNumber } from "@/lib/format";
 import { heightWords } from "./height-words";
@@ -27,10 +26,7 @@ export function PatientStrip({ sheet, hours, actions }: PatientStripProps) {
           <div>
             <h1 className="t-strip max-tablet:text-[18px]">
               {patient.name}, {patient.ageYears}
-              {sex}{" "}
-              <span className="tablet:hidden">
-                <DemoChip />
-              </span>
+              {sex}
             </h1>
             <p className="text-muted t-label">
               born {calendarDate(patient.birthDate)}, MRN {patient.mrn}, day {episode.day}

@@ -2,8 +2,9 @@ import { PressureSpan } from "@/components/figures/pressure-span";
 import { Quantity } from "@/components/figures/quantity";
 import { StateWord } from "@/components/figures/state-word";
 import { VolumeLadder } from "@/components/figures/volume-ladder";
-import type { Worksheet } from "@/lib/contracts";
+import type { Derived, Worksheet } from "@/lib/contracts";
 import { displayNumber } from "@/lib/format";
+import { lastOutsideTime } from "./freshness-of";
 import { ladderOf } from "./ladder-of";
 import { OrderWords } from "./span-panel";
 import { spanOf } from "./span-of";
@@ -18,7 +19,7 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
     <div className="pt-3 tablet:hidden">
       <div className="flex flex-wrap items-baseline gap-x-3">
         <Result value={volume?.value ?? null} decimals={1} unit={volume?.unit ?? "mL/kg"} limit={volume?.limit} />
-        <StateWord state={volume?.state ?? null} shape />
+        <PhoneState derived={volume} timeZone={sheet.unit.timeZone} />
         {ordered && (
           <span className="text-muted t-label">
             {volume?.limit?.origin === "order" ? "ordered" : "default"} {ordered}
@@ -31,12 +32,18 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
         <div className="flex-1">
           <p className="text-muted t-label">Driving pressure</p>
           <Result value={driving?.value ?? null} decimals={0} unit="cmH2O" limit={driving?.limit} />
-          <StateWord state={driving?.state ?? null} shape />
+          <PhoneState derived={driving} timeZone={sheet.unit.timeZone} />
           <OrderWords sheet={sheet} />
         </div>
       </div>
     </div>
   );
+}
+
+function PhoneState({ derived, timeZone }: { derived: Derived | undefined; timeZone: string }) {
+  if (!derived) return null;
+  const lastOutsideAt = lastOutsideTime(derived, timeZone);
+  return <StateWord state={derived.state} shape {...(lastOutsideAt && { lastOutsideAt })} />;
 }
 
 interface ResultProps {

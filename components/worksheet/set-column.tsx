@@ -84,14 +84,10 @@ function flowLabel(field: string, label: string, { settings }: Worksheet): strin
 
 function SettingsCheck({ sheet, timeZone }: { sheet: Worksheet; timeZone: string }) {
   const due = sheet.due.find(({ what }) => what === "settings-check");
-  const checked = sheet.settingsCheckedAt;
-  const words = due ? `due ${timeOfDay({ at: due.dueAt, timeZone })}` : "not due";
+  const words = due ? `${due.overdue ? "overdue since" : "due"} ${timeOfDay({ at: due.dueAt, timeZone })}` : "not due";
   return (
-    <SheetCell
-      label="Settings check"
-      aside={checked ? `checked ${timeOfDay({ at: checked.chartedAt, timeZone })}` : undefined}
-    >
-      <span className={`t-state ${due?.overdue ? "text-edge" : ""}`}>{due?.overdue ? `over${words}` : words}</span>
+    <SheetCell label="Settings check">
+      <span className={`t-state ${due?.overdue ? "text-edge" : ""}`}>{words}</span>
     </SheetCell>
   );
 }

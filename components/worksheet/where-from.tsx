@@ -19,28 +19,22 @@ export function WhereFrom({ sheet, row, now, onClose }: WhereFromProps) {
   const derived = row ? sheet.derived[row.name] : undefined;
   return (
     <SideSheet open={row !== null} onClose={onClose} title={row ? `${row.label}: where from` : ""}>
-      {row && derived && <Explained row={row} derived={derived} now={now} timeZone={sheet.unit.timeZone} />}
+      {row && derived && <Explained row={row} derived={derived} now={now} sheet={sheet} />}
     </SideSheet>
   );
 }
 
-function Explained({
-  row,
-  derived,
-  now,
-  timeZone,
-}: {
-  row: DerivedRow;
-  derived: Derived;
-  now: number;
-  timeZone: string;
-}) {
+function Explained({ row, derived, now, sheet }: { row: DerivedRow; derived: Derived; now: number; sheet: Worksheet }) {
+  const { pbwKg } = sheet;
+  const { timeZone } = sheet.unit;
   const shown = derived.value ?? derived.lastValue;
   return (
     <div className="space-y-4">
       {shown !== null && (
         <p className="t-head">
-          <Subscripted text={`${arithmeticOf(row.name, derived)} = ${writeDerived(row, derived, shown)} ${row.unit}`} />
+          <Subscripted
+            text={`${arithmeticOf(row.name, derived, pbwKg)} = ${writeDerived(row, derived, shown)} ${row.unit}`}
+          />
         </p>
       )}
       {derived.value === null && shown !== null && (

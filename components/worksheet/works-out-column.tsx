@@ -5,7 +5,7 @@ import type { Derived, Worksheet } from "@/lib/contracts";
 import { displayNumber, timeOfDay } from "@/lib/format";
 import { arithmeticOf } from "./arithmetic";
 import { ColumnHead } from "./column-head";
-import { freshnessOf } from "./freshness-of";
+import { freshnessOf, lastOutsideTime } from "./freshness-of";
 import { Judged } from "./judged";
 import { noteWords } from "./note-words";
 import { derivedRows, gasDerivedRows, lastDerivedRows, type DerivedRow } from "./rows";
@@ -27,7 +27,16 @@ export function WorksOutColumn({ sheet, now, onWhereFrom }: WorksOutColumnProps)
       {rows.map((row) => {
         const derived = sheet.derived[row.name];
         if (!derived) return null;
-        return <DerivedCell key={row.name} row={row} derived={derived} clock={clock} onOpen={() => onWhereFrom(row)} />;
+        return (
+          <DerivedCell
+            key={row.name}
+            row={row}
+            derived={derived}
+            clock={clock}
+            pbwKg={sheet.pbwKg}
+            onOpen={() => onWhereFrom(row)}
+          />
+        );
       })}
     </section>
   );
@@ -37,12 +46,13 @@ interface DerivedCellProps {
   row: DerivedRow;
   derived: Derived;
   clock: { now: number; timeZone: string };
+  pbwKg: number | null;
   onOpen: () => void;
 }
 
-function DerivedCell({ row, derived, clock, onOpen }: DerivedCellProps) {
+function DerivedCell({ row, derived, clock, pbwKg, onOpen }: DerivedCellProps) {
   const { value, state } = derived;
-  const aside = value === null ? lastWords(row, derived, clock.timeZone) : arithmeticOf(row.name, derived);
+  const aside = value === null ? lastWords(row, derived, clock.timeZone) : howWords(row, derived, pbwKg);
   return (
     <SheetCell label={row.label} aside={aside} onOpen={onOpen} opens={`where ${row.label} comes from`}>
       {value === null ? (
@@ -51,7 +61,7 @@ function DerivedCell({ row, derived, clock, onOpen }: DerivedCellProps) {
         <>
           <SheetNumber text={writeDerived(row, derived, value)} unit={unitWords(row, derived)} />
           {state && row.name in trackDomains && (
-            <Judged {...derived} metric={row.name as TrackMetric} name={row.label} state={state} trackWidth={104} />
+            <Judged {...derived} metric={row.name as TrackMetric} name={row.label} state={state} widths={[78, 104]} />
           )}
         </>
       )}
@@ -59,10 +69,15 @@ function DerivedCell({ row, derived, clock, onOpen }: DerivedCellProps) {
   );
 }
 
-/** 'mL/kg', 'L/min, set × set', 'moderate'. */
-function unitWords(row: DerivedRow, { unit, band, notes }: Derived): string {
-  const measuredIn = unit === "mL" ? "mL" : row.unit;
-  return [measuredIn, band, noteWords(notes)].filter(Boolean).join(", ");
+/** 'mL/kg', 'moderate'. */
+function unitWords(row: DerivedRow, { unit, band }: Derived): string {
+  return [unit === "mL" ? "mL" : row.unit, band].filter(Boolean).join(" ");
+}
+
+/** The sum, and on what it rests; what one row has said of the pressures below it is not said again. */
+function howWords(row: DerivedRow, derived: Derived, pbwKg: number | null): string {
+  const said = row.name === "drivingPressureCmH2O" || row.name === "vtMlPerKg";
+  return [arithmeticOf(row.name, derived, pbwKg), said ? noteWords(derived.notes) : null].filter(Boolean).join(", ");
 }
 
 /** Decimals grow where rounding would hide on which side of a limit the value stands. */
@@ -79,10 +94,8 @@ function lastWords(row: DerivedRow, derived: Derived, timeZone: string): string 
 
 function Unmeasured({ row, derived, clock }: Pick<DerivedCellProps, "row" | "derived" | "clock">) {
   if (derived.state === "not-asked") return <span className="text-muted t-body">not asked</span>;
-  if (derived.lastState === "outside" && derived.chartedAt) {
-    const at = timeOfDay({ at: derived.chartedAt, timeZone: clock.timeZone });
-    return <StateWord state="unmeasured" lastOutsideAt={at} />;
-  }
+  const lastOutsideAt = lastOutsideTime(derived, clock.timeZone);
+  if (lastOutsideAt) return <StateWord state="unmeasured" lastOutsideAt={lastOutsideAt} />;
   const note = noteWords(derived.notes);
   if (note) return <NotMeasured why={note} />;
   return <Freshness {...freshnessOf(derived, clock, row.needs)} narrow />;

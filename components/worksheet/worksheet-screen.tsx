@@ -37,14 +37,20 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
       <PatientStrip sheet={sheet} hours={hours} actions={<EntryActions sheet={sheet} />} />
       <Connection sheet={sheet} failing={query.failureCount > 0} now={now} />
       <div className="flex desk:min-h-[calc(100dvh-148px)]">
-        <div className="min-w-0 flex-1 page-margin pb-24 desk:pb-12">
+        <div className="min-w-0 flex-1 page-margin pb-8 desk:pr-6 desk:pb-12">
           <PhoneSummary sheet={sheet} now={now} />
           <Ladder sheet={sheet} />
-          <div className="grid gap-x-4 tablet:grid-cols-[148px_272px_1fr_196px] desk:grid-cols-[178px_292px_1fr_214px] desk:gap-x-6">
-            <SetColumn sheet={sheet} onEnter={enter} onHistory={setHistory} />
-            <MeasuredColumn sheet={sheet} now={now} onHistory={setHistory} />
-            <WorksOutColumn sheet={sheet} now={now} onWhereFrom={setWhereFrom} />
-            <div className="max-tablet:hidden">
+          <div className="grid tablet:grid-cols-[158px_306px_1fr_204px] desk:grid-cols-[184px_304px_1fr_222px]">
+            <div className="tablet:pr-2.5">
+              <SetColumn sheet={sheet} onEnter={enter} onHistory={setHistory} />
+            </div>
+            <div className={ruled}>
+              <MeasuredColumn sheet={sheet} now={now} onHistory={setHistory} />
+            </div>
+            <div className={ruled}>
+              <WorksOutColumn sheet={sheet} now={now} onWhereFrom={setWhereFrom} />
+            </div>
+            <div className="pl-2 max-tablet:hidden">
               <div className="max-desk:hidden">
                 <SpanPanel sheet={sheet} now={now} size="large" />
               </div>
@@ -62,6 +68,9 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
     </>
   );
 }
+
+/** A hairline between the sheet's columns. */
+const ruled = "tablet:border-l tablet:border-hair tablet:pr-2.5 tablet:pl-4";
 
 function Ladder({ sheet }: { sheet: Worksheet }) {
   const ladder = ladderOf(sheet);
