@@ -45,3 +45,8 @@ export function asksPlateauOnceHeld(mode: VentilationMode): boolean {
 export function isNonInvasive(mode: VentilationMode): boolean {
   return mode === "NIV" || mode === "HFNO";
 }
+
+/** V10: power is asked in assist-control only. */
+export function asksPower(mode: VentilationMode): boolean {
+  return mode === "A/C-VC" || mode === "A/C-PC" || mode === "A/C-vtPC";
+}

@@ -1,8 +1,8 @@
 import { foresee, freshnessOf, isFresh, tooSoonAfter, type Ageing, type Freshness } from "../freshness";
-import { millisecondsOf } from "../instant";
 import type { NoteCode } from "../note-codes";
 import type { State } from "../result";
 import type { Scene } from "../scene";
+import { recordedAt } from "../timeline/item";
 import { missing, type Excursion, type Judged, type Named, type OutsideRun } from "./judged";
 import type { Reading } from "./reading";
 
@@ -54,7 +54,7 @@ function lastJudged(scene: Scene, series: Series, newest: Reading): Found | null
   return null;
 }
 
-const recordedOf = (reading: Reading) => millisecondsOf(reading.item.fact.recordedAt);
+const recordedOf = (reading: Reading) => recordedAt(reading.item);
 
 /** S6, F9: how long it has been outside: back over outside readings, skipping withheld ones. */
 function outsideRun(scene: Scene, series: Series, { index, reading: last }: Found): OutsideRun {

@@ -47,7 +47,9 @@ export type Named = Pick<Judged, "name" | "unit" | "source">;
 /** What was never measured. */
 export function missing(named: Named, limit: Range | null, dueAt: number | null = null): Judged {
   return {
-    ...named,
+    name: named.name,
+    unit: named.unit,
+    source: named.source,
     limit,
     state: limit ? "unmeasured" : null,
     freshness: "missing",

@@ -1,14 +1,22 @@
-import { isoOf, millisecondsOf } from "../instant";
+import { isoOf } from "../instant";
 import type { Derived, DerivedInput } from "../result";
 import type { Scene } from "../scene";
+import { recordedAt } from "../timeline/item";
 import type { Judged } from "./judged";
 import type { Input } from "./reading";
 
 function presentInput({ name, value, unit, item }: Input): DerivedInput {
   if (!item) return { name, value, unit, entryId: null, chartedAt: null, recordedAt: null, author: null };
   const { fact, t } = item;
-  const recordedAt = isoOf(millisecondsOf(fact.recordedAt));
-  return { name, value, unit, entryId: fact.id, chartedAt: isoOf(t), recordedAt, author: fact.author };
+  return {
+    name,
+    value,
+    unit,
+    entryId: fact.id,
+    chartedAt: isoOf(t),
+    recordedAt: isoOf(recordedAt(item)),
+    author: fact.author,
+  };
 }
 
 /** A judged metric in the answer's shape. `inputs` are those of the value, else of the last one. */

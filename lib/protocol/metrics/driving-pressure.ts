@@ -18,12 +18,12 @@ const named = {
 export function judgeDrivingPressure(scene: Scene): Judged {
   const limit = orderedRange(scene.targets.drivingPressureCmH2O);
   if (!scene.settings) return { ...missing(named, limit), notes: ["not-computable"] };
-  const holds = plateausUntil(scene);
+  const { holds, count } = plateausUntil(scene);
   const dueAt = scene.asksPlateau ? holdDueAt(scene) : null;
   const judged = judgeSeries(scene, {
     named,
     limit,
-    count: holds.length,
+    count,
     read: (index) =>
       readHold(scene, holds[index]!, (paired) => ({
         value: computable(() => drivingPressureCmH2O(paired)),

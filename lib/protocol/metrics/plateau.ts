@@ -22,10 +22,10 @@ export function metEffort(hold: Hold): boolean {
   return hold.quality === "effort" || hold.quality === "unsure" || hold.quality === "unsaid";
 }
 
-/** Holds that charted a plateau, ascending: `not-possible` charts none, and in APRV P-high stands for it. */
-export function plateausUntil(scene: Scene): Hold[] {
+/** How many holds charted a plateau by now: `not-possible` charts none, and in APRV P-high stands for it. */
+export function plateausUntil(scene: Scene): { holds: readonly Hold[]; count: number } {
   const { plateaus } = scene.line;
-  return plateaus.slice(0, countUntil(plateaus, scene.at));
+  return { holds: plateaus, count: countUntil(plateaus, scene.at) };
 }
 
 function inputsOf(hold: Hold): Input[] {
@@ -68,13 +68,13 @@ const setValueAgeing: Ageing = { row: null, intervalMin: 0, timeless: true };
 export function judgePlateau(scene: Scene): Judged {
   const limit = orderedRange(scene.targets.plateauCmH2O);
   if (!scene.settings) return { ...missing(plateau, limit), notes: ["not-computable"] };
-  const holds = plateausUntil(scene);
+  const { holds, count } = plateausUntil(scene);
   const inAprv = scene.mode === "APRV";
   const dueAt = holdDueAt(scene);
   const judged = judgeSeries(scene, {
     named: plateau,
     limit,
-    count: holds.length,
+    count,
     read: (index) => readingOf(holds[index]!),
     ageing: inAprv ? setValueAgeing : pressureAgeing(scene),
     dueAt: () => dueAt,

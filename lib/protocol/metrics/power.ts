@@ -7,14 +7,16 @@ import { judgeSeries } from "../judge/judge-series";
 import { missing, notAsked, type Judged } from "../judge/judged";
 import type { Input, Reading } from "../judge/reading";
 import { orderedRange, withinOrder } from "../judge/within-order";
+import { asksPower } from "../modes-asked";
 import type { NoteCode } from "../note-codes";
 import { settingsAt, type Scene } from "../scene";
 import { numberInForce } from "../timeline/fold-settings";
 import type { Hold } from "../timeline/holds";
+import type { PowerReading } from "../timeline/power-readings";
 import { countUntil, type Item } from "../timeline/item";
 import { afterInterval } from "./after-interval";
 import { readHold } from "./hold-reading";
-import { metEffort, plateausUntil } from "./plateau";
+import { metEffort } from "./plateau";
 import { settingInput } from "./setting-input";
 import { totalRateAt } from "./total-rate";
 import { volumeAt } from "./volume-at";
@@ -52,8 +54,7 @@ function readVolumeControl(scene: Scene, hold: Hold): Reading {
     const peakCmH2O = item.fact.peakCmH2O ?? null;
     const { volumeMl, inputs: volumes } = volumeAt(scene, item);
     const rate = rateAt(scene, item);
-    const isVolumeControl = hold.snapshot?.mode === "A/C-VC";
-    if (!isVolumeControl || peakCmH2O === null || volumeMl === null || rate.perMin === null) {
+    if (peakCmH2O === null || volumeMl === null || rate.perMin === null) {
       return { value: null, inputs: [] };
     }
     const pressures = { peakCmH2O, plateauCmH2O, totalPeepCmH2O };
@@ -95,8 +96,8 @@ function readPressureControl(scene: Scene, item: Item<MechanicsFact>): Reading {
 }
 
 /** V8: unmeasured while a hold with effort is the newest one. */
-function whileRelaxed(scene: Scene, reading: Reading, isNewest: boolean): Reading {
-  const hold = isNewest ? newestHold(scene) : null;
+function whileRelaxed(scene: Scene, reading: Reading): Reading {
+  const hold = newestHold(scene);
   return hold && metEffort(hold) ? { ...reading, value: null, effort: true, notes: ["patient-effort"] } : reading;
 }
 
@@ -105,22 +106,22 @@ export function judgePower(scene: Scene): Judged {
   const limit = orderedRange(scene.targets.mechanicalPowerJPerMin);
   if (!scene.settings) return { ...missing(volumeForm, limit), notes: ["not-computable"] };
   const { mode } = scene.settings;
-  const byPressure = mode === "A/C-PC" || mode === "A/C-vtPC";
-  const holds = plateausUntil(scene);
-  const { exhaled } = scene.line;
-  const count = byPressure ? countUntil(exhaled, scene.at) : holds.length;
+  const { powerReadings } = scene.line;
+  const count = countUntil(powerReadings, scene.at);
   const { pressuresMin } = scene.policy.intervals;
+  const read = ({ hold, item }: PowerReading) =>
+    hold ? readVolumeControl(scene, hold) : readPressureControl(scene, item!);
   const judged = judgeSeries(scene, {
-    named: byPressure ? pressureForm : volumeForm,
+    named: mode === "A/C-VC" ? volumeForm : pressureForm,
     limit,
     count,
-    read: (index) =>
-      byPressure
-        ? whileRelaxed(scene, readPressureControl(scene, exhaled[index]!), index === count - 1)
-        : readVolumeControl(scene, holds[index]!),
+    read: (index) => {
+      const reading = read(powerReadings[index]!);
+      return index === count - 1 ? whileRelaxed(scene, reading) : reading;
+    },
     ageing: { row: "power", intervalMin: pressuresMin },
     dueAt: ({ t }) => afterInterval(scene, t, pressuresMin),
     verdict: ({ value }) => ({ state: withinOrder("mechanicalPowerJPerMin", value!, limit!) }),
   });
-  return byPressure || mode === "A/C-VC" ? judged : notAsked(judged);
+  return asksPower(mode) ? judged : notAsked(judged);
 }

@@ -42,12 +42,12 @@ function read({ t, item, snapshot, ...hold }: Hold): Reading {
 /** V10: asked in A/C-VC with constant flow only. */
 export function judgeResistance(scene: Scene): Judged {
   if (!scene.settings) return { ...missing(named, null), notes: ["not-computable"] };
-  const holds = plateausUntil(scene);
+  const { holds, count } = plateausUntil(scene);
   const dueAt = isConstantFlow(scene.settings) ? holdDueAt(scene) : null;
   const judged = judgeSeries(scene, {
     named,
     limit: null,
-    count: holds.length,
+    count,
     read: (index) => read(holds[index]!),
     ageing: { row: "flow", intervalMin: scene.policy.intervals.pressuresMin },
     dueAt: () => dueAt,

@@ -17,12 +17,12 @@ const named = {
 /** V4, V5, V8: volume at the reading over its driving pressure. */
 export function judgeStaticCompliance(scene: Scene): Judged {
   if (!scene.settings) return { ...missing(named, null), notes: ["not-computable"] };
-  const holds = plateausUntil(scene);
+  const { holds, count } = plateausUntil(scene);
   const dueAt = scene.asksPlateau ? holdDueAt(scene) : null;
   const judged = judgeSeries(scene, {
     named,
     limit: null,
-    count: holds.length,
+    count,
     read: (index) =>
       readHold(scene, holds[index]!, (paired) => {
         const { volumeMl, inputs } = volumeAt(scene, paired.item);

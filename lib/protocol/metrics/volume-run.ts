@@ -1,8 +1,7 @@
-import { millisecondsOf } from "../instant";
 import type { Excursion, OutsideRun } from "../judge/judged";
 import type { State } from "../result";
 import type { Scene } from "../scene";
-import { countUntil } from "../timeline/item";
+import { countUntil, recordedAt } from "../timeline/item";
 import type { VolumePoint } from "../timeline/volume-points";
 import { judgeVolumeMl } from "./judge-volume";
 
@@ -31,7 +30,7 @@ function step(walk: Walk, point: VolumePoint, state: State): void {
     walk.run = null;
     return;
   }
-  const recorded = millisecondsOf(point.item.fact.recordedAt);
+  const recorded = recordedAt(point.item);
   walk.run = walk.run
     ? { since: walk.run.since, recordedFrom: Math.min(walk.run.recordedFrom, outside ? recorded : Infinity) }
     : { since: point.t, recordedFrom: recorded };
@@ -60,9 +59,9 @@ export function volumeExcursionsAfter(scene: Scene, t: number): Excursion[] {
     if (state === null) continue;
     const starts = walk.run === null;
     step(walk, point, state);
-    const recordedAt = millisecondsOf(point.item.fact.recordedAt);
+    const recorded = recordedAt(point.item);
     if (state === "outside" && value !== null && point.t > t)
-      excursions.push({ t: point.t, recordedAt, value, starts });
+      excursions.push({ t: point.t, recordedAt: recorded, value, starts });
   }
   return excursions;
 }

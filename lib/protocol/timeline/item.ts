@@ -5,6 +5,14 @@ import { millisecondsOf } from "../instant";
 export interface Item<Fact extends FactBase = FactBase> {
   t: number;
   fact: Fact;
+  /** `recordedAt` as milliseconds, once asked for; 0 before. */
+  recorded: number;
+}
+
+/** When the fact was recorded, milliseconds. */
+export function recordedAt(item: Item): number {
+  if (item.recorded === 0) item.recorded = millisecondsOf(item.fact.recordedAt);
+  return item.recorded;
 }
 
 const recordedOf = (fact: FactBase) => millisecondsOf(fact.place?.recordedAt ?? fact.recordedAt);
@@ -26,7 +34,7 @@ function compareItems(a: Item, b: Item): number {
 
 /** Facts ascending; those already in order are not sorted again. */
 export function itemsInOrder<Fact extends FactBase>(facts: readonly Fact[] | null | undefined): Item<Fact>[] {
-  const items = (facts ?? []).map((fact) => ({ t: millisecondsOf(fact.chartedAt), fact }));
+  const items = (facts ?? []).map((fact) => ({ t: millisecondsOf(fact.chartedAt), fact, recorded: 0 }));
   const inOrder = items.every((item, index) => index === 0 || compareItems(items[index - 1]!, item) <= 0);
   return inOrder ? items : items.sort(compareItems);
 }

@@ -17,6 +17,7 @@ import { foldSettings, type Snapshot } from "./fold-settings";
 import { holdsOf, isPlateau, type Hold } from "./holds";
 import { itemsInOrder, newestUntil, type Item } from "./item";
 import { positionChanges, therapyChanges } from "./other-changes";
+import { powerReadingsOf, type PowerReading } from "./power-readings";
 import { settingChanges } from "./setting-changes";
 import { volumePointsOf, type VolumePoint } from "./volume-points";
 
@@ -38,6 +39,8 @@ export interface Timeline {
   /** V8: holds that charted a plateau; in APRV P-high alone. */
   plateaus: Hold[];
   volumePoints: VolumePoint[];
+  /** V10: holds in A/C-VC; exhaled volumes in A/C-PC and A/C-vtPC. */
+  powerReadings: PowerReading[];
   exhaled: Mechanics[];
   /** V7: exhaled volume and total rate of one reading, SIMV left out: there exhaled is the mandatory breaths' alone. */
   exhaledWithRate: Mechanics[];
@@ -130,6 +133,7 @@ function build(facts: Facts): Timeline {
     ),
     holds,
     plateaus: holds.filter(isPlateau),
+    powerReadings: powerReadingsOf(holds, measured.exhaled, snapshots),
     volumePoints: volumePointsOf(snapshots, mechanics),
     moments: moments.sort((a, b) => a.t - b.t),
   };
