@@ -14,7 +14,7 @@ const HEALTH_ATTEMPT_MS = 5_000;
 
 // Next's own greeting; the launcher says where the server answers once it does.
 const GREETING =
-  /^\s*(▲ Next\.js|- (Local|Network|Environments|Experiments)\b|✓ (Starting|Ready|Running next\.config)\b|$)/;
+  /^\s*(▲ Next\.js|- (Local|Network|Environments|Experiments)\b|✓ (Starting|Ready|Running next\.config)\b|✓ \w+$|$)/;
 
 function forward(stream, log, print) {
   createInterface({ input: stream }).on("line", (line) => {
