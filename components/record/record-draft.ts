@@ -3,10 +3,13 @@ import { bedsideEntryBodySchema, clientKeySchema, settingsCheckBodySchema } from
 import { filledSchema } from "./filled";
 import { recordValuesSchema } from "./record-values";
 
-export const sendingSchema = z.discriminatedUnion("route", [
+const entrySchema = z.discriminatedUnion("route", [
   z.object({ route: z.literal("bedside-entries"), body: bedsideEntryBodySchema }),
   z.object({ route: z.literal("settings-checks"), body: settingsCheckBodySchema }),
 ]);
+
+/** An entry on its way: the body under its key, and the form it came from, should the server refuse it. */
+export const sendingSchema = z.object({ entry: entrySchema, values: recordValuesSchema, filled: filledSchema });
 
 export type Sending = z.infer<typeof sendingSchema>;
 
@@ -14,7 +17,8 @@ export type Sending = z.infer<typeof sendingSchema>;
 export const recordDraftSchema = z.object({
   version: z.literal(1),
   values: recordValuesSchema,
-  filled: filledSchema,
+  /** Null: nothing typed, only something on its way. */
+  filled: filledSchema.nullable(),
   clientKey: clientKeySchema,
   /** Bed at opening, to say so when the patient has moved. */
   bedId: z.string().nullable(),

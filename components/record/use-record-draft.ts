@@ -1,46 +1,55 @@
 "use client";
 
-import { useEffect, useState } from "react";
-import { keepDraft, readDraft, type DraftOwner } from "@/lib/client/drafts";
+import { useEffect, useEffectEvent, useState } from "react";
+import { dropDraft, keepDraft, readDraft, type DraftOwner } from "@/lib/client/drafts";
 import { recordDraftSchema, type RecordDraft } from "./record-draft";
 
+interface DraftKeeping {
+  owner: DraftOwner;
+  /** What is to be kept now; null: nothing typed, nothing on its way. */
+  draft: RecordDraft | null;
+  onFound: (draft: RecordDraft) => void;
+}
+
 /**
- * Reads this person's draft for this episode once. `undefined` while it is being read, null where there is none.
- * Another person, or another episode, never sees it: the key names both.
+ * Reads this person's draft for this episode once, and keeps every change on this device from then on. Another person,
+ * or another episode, never sees it: the key names both. `failed`: the device refuses to keep it.
  */
-export function useKeptDraft({ userId, episodeId, form }: DraftOwner): RecordDraft | null | undefined {
-  const [kept, setKept] = useState<RecordDraft | null | undefined>(undefined);
+export function useRecordDraft({ owner, draft, onFound }: DraftKeeping): { failed: boolean } {
+  const { userId, episodeId, form } = owner;
+  const [read, setRead] = useState(false);
+  const [failed, setFailed] = useState(false);
+  const found = useEffectEvent(onFound);
+
   useEffect(() => {
     let wanted = true;
-    const take = (draft: RecordDraft | null) => {
-      if (wanted) setKept(draft);
+    const take = (kept: RecordDraft | null) => {
+      if (!wanted) return;
+      if (kept) found(kept);
+      setRead(true);
     };
     readDraft({ userId, episodeId, form }, recordDraftSchema).then(take, () => take(null));
     return () => {
       wanted = false;
     };
   }, [userId, episodeId, form]);
-  return kept;
-}
 
-/** Keeps the draft on this device on every change, and says when the device refuses. */
-export function useKeepDraft(owner: DraftOwner, draft: RecordDraft | null): { failed: boolean } {
-  const [failed, setFailed] = useState(false);
-  const { userId, episodeId, form } = owner;
-  const text = draft ? JSON.stringify(draft) : null;
+  const text = draft && JSON.stringify(draft);
   useEffect(() => {
-    if (text === null) return;
+    if (!read) return;
     let wanted = true;
+    const kept = { userId, episodeId, form };
+    const done = text === null ? dropDraft(kept) : keepDraft(kept, JSON.parse(text));
     const say = (refused: boolean) => {
       if (wanted) setFailed(refused);
     };
-    keepDraft({ userId, episodeId, form }, JSON.parse(text)).then(
+    done.then(
       () => say(false),
       () => say(true),
     );
     return () => {
       wanted = false;
     };
-  }, [userId, episodeId, form, text]);
+  }, [userId, episodeId, form, text, read]);
   return { failed };
 }

@@ -22,18 +22,24 @@ export interface RecordEditing {
   clear: () => void;
 }
 
-/** What a person has put in over what the form was filled with. Until the first touch the filling follows the record. */
-export function useRecordValues(latest: Filled): RecordEditing {
+interface Filling {
+  /** The filling of this rendering; until the first touch it follows the record and the clock. */
+  shown: Filled;
+  /** The filling at the very moment of the first touch. */
+  fillNow: () => Filled;
+  onEdit: () => void;
+}
+
+/** What a person has put in over what the form was filled with. */
+export function useRecordValues({ shown, fillNow, onEdit }: Filling): RecordEditing {
   const { control, reset, setValue } = useForm<RecordValues>({ defaultValues: emptyRecord });
   const values = useWatch({ control }) as RecordValues;
   const [frozen, setFrozen] = useState<Filled | null>(null);
-  const set: SetRecordValue = useCallback(
-    (name, value) => {
-      setFrozen((held) => held ?? latest);
-      setValue(name, value, { shouldDirty: true });
-    },
-    [latest, setValue],
-  );
+  const set: SetRecordValue = (name, value) => {
+    setFrozen((held) => held ?? fillNow());
+    setValue(name, value, { shouldDirty: true });
+    onEdit();
+  };
   const restore = useCallback(
     (kept: RecordValues, filled: Filled) => {
       setFrozen(filled);
@@ -45,5 +51,5 @@ export function useRecordValues(latest: Filled): RecordEditing {
     setFrozen(null);
     reset(emptyRecord);
   }, [reset]);
-  return { values, filled: frozen ?? latest, begun: frozen !== null, set, refill: setFrozen, restore, clear };
+  return { values, filled: frozen ?? shown, begun: frozen !== null, set, refill: setFrozen, restore, clear };
 }

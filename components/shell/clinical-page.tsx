@@ -12,11 +12,12 @@ interface ClinicalPageProps {
   now: string;
   /** The patient this page is about; the top bar leads back here. */
   patientId?: string;
+  barOnPhone?: boolean;
   children: ReactNode;
 }
 
 /** A clinical screen in its frame: who is signed in, the unit's clock, and the way to the patient last seen. */
-export function ClinicalPage({ me, here, unit, now, patientId, children }: ClinicalPageProps) {
+export function ClinicalPage({ me, here, unit, now, patientId, barOnPhone, children }: ClinicalPageProps) {
   const lastSeen = useLastSeenPatient(me.user.id, patientId);
   const bar = {
     here,
@@ -25,7 +26,11 @@ export function ClinicalPage({ me, here, unit, now, patientId, children }: Clini
     worksheetHref: lastSeen === null ? null : `/patients/${lastSeen}`,
     userName: me.user.name,
   };
-  return <PageFrame bar={bar}>{children}</PageFrame>;
+  return (
+    <PageFrame bar={bar} barOnPhone={barOnPhone}>
+      {children}
+    </PageFrame>
+  );
 }
 
 /** Kept on this device by person: an id, no name. */

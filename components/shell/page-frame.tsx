@@ -2,8 +2,15 @@ import type { ReactNode } from "react";
 import { CautionLine } from "./caution-line";
 import { TopBar, type TopBarProps } from "./top-bar";
 
+interface PageFrameProps {
+  bar: TopBarProps;
+  /** False where a phone needs the height for entry, and the page's own header leads back. */
+  barOnPhone?: boolean;
+  children: ReactNode;
+}
+
 /** A clinical screen: top bar, the page, the caution at its foot. */
-export function PageFrame({ bar, children }: { bar: TopBarProps; children: ReactNode }) {
+export function PageFrame({ bar, barOnPhone = true, children }: PageFrameProps) {
   return (
     <div className="flex min-h-dvh flex-col">
       <a
@@ -12,7 +19,9 @@ export function PageFrame({ bar, children }: { bar: TopBarProps; children: React
       >
         To the page
       </a>
-      <TopBar {...bar} />
+      <div className={barOnPhone ? "contents" : "contents max-tablet:hidden"}>
+        <TopBar {...bar} />
+      </div>
       <main id="page" className="flex min-w-0 flex-1 flex-col">
         {children}
       </main>

@@ -33,23 +33,29 @@ interface WorksheetQuery {
 
 /** The worksheet as rendered by the server, then kept fresh; polling rests while the page is hidden. */
 export function useWorksheet({ patientId, initial, withFacts = false }: WorksheetQuery) {
-  return useQuery({
+  const query = useQuery({
     ...worksheetOptions(patientId, withFacts),
     initialData: initial,
     initialDataUpdatedAt: Date.parse(initial.at),
   });
+  // An answer held from an earlier visit may be older than the page that was just rendered.
+  const data = Date.parse(query.data.at) >= Date.parse(initial.at) ? query.data : initial;
+  return { data, failureCount: query.failureCount };
 }
 
 /** A save's own answer is the newest truth of that patient: put it in place, and ask anew for the rest. */
-export async function holdWorksheet(client: QueryClient, worksheet: Worksheet): Promise<void> {
+export function holdWorksheet(client: QueryClient, worksheet: Worksheet): void {
   observeServerTime(worksheet.at);
   const { id } = worksheet.patient;
   client.setQueryData(queryKeys.worksheet(id), worksheet);
-  await Promise.all([
-    client.invalidateQueries({ queryKey: queryKeys.worksheetWithFacts(id) }),
-    client.invalidateQueries({ queryKey: queryKeys.allEntries(id) }),
-    client.invalidateQueries({ queryKey: queryKeys.unit(worksheet.unit.id) }),
-  ]);
+  // Not waited for: the save is done, whatever becomes of these.
+  for (const queryKey of [
+    queryKeys.worksheetWithFacts(id),
+    queryKeys.allEntries(id),
+    queryKeys.unit(worksheet.unit.id),
+  ]) {
+    void client.invalidateQueries({ queryKey });
+  }
 }
 
 export function useRefetchWorksheet(patientId: string): () => Promise<void> {

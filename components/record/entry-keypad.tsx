@@ -1,0 +1,81 @@
+"use client";
+
+import { useEffect } from "react";
+import { Keypad, type KeypadProps } from "@/components/ui/keypad";
+import { holdQualities } from "@/lib/contracts";
+import type { NumericSettingField } from "@/lib/physiology";
+import {
+  mechanicsStyles,
+  observationStyles,
+  settingStyles,
+  type MechanicsNumber,
+  type ObservationNumber,
+} from "./form-fields";
+import { holdWords } from "./hold-words";
+import type { TypingTarget } from "./typing";
+import { useRecord } from "./use-record";
+import styles from "./record.module.css";
+
+const holds: KeypadProps["choices"] = holdQualities.map((value) => ({
+  value,
+  words: holdWords[value],
+  apart: value === "not-possible",
+}));
+
+/** The keypad of the field being typed into; beside a plateau's digits, how the hold was. */
+export function EntryKeypad() {
+  const { typing, editing } = useRecord();
+  const { target } = typing;
+  useCloseBeside(target !== null, typing.close);
+  useShowField(target);
+  if (!target) return null;
+  const isPlateau = target.field === "plateauCmH2O";
+  return (
+    <div className={styles.keypad} data-over={target.part === "settings" ? "measured" : "settings"} data-keypad-zone>
+      <Keypad
+        label={labelOf(target)}
+        text={typing.text}
+        onChange={typing.type}
+        onClose={typing.close}
+        {...(isPlateau && { choices: holds, onChoose: choose })}
+      />
+    </div>
+  );
+
+  function choose(hold: string) {
+    editing.set("hold", holdQualities.find((each) => each === hold) ?? null);
+    typing.close();
+  }
+}
+
+function labelOf({ part, field }: TypingTarget): string {
+  if (part === "settings") return settingStyles[field as NumericSettingField].label;
+  if (part === "mechanics") return mechanicsStyles[field as MechanicsNumber].label;
+  return observationStyles[field as ObservationNumber].label;
+}
+
+/** There is no OK key: a touch on anything that is not typed into closes the keypad. */
+function useCloseBeside(open: boolean, close: () => void) {
+  useEffect(() => {
+    if (!open) return;
+    const leave = (event: MouseEvent) => {
+      const touched = event.target;
+      if (!(touched instanceof Element)) return;
+      if (!touched.closest("[data-keypad-zone], input, [role=group], [data-record-foot]")) close();
+    };
+    document.addEventListener("click", leave);
+    return () => document.removeEventListener("click", leave);
+  }, [open, close]);
+}
+
+/** The keypad covers the lower half of a phone: the field it types into moves above it. */
+function useShowField(target: TypingTarget | null) {
+  const name = target && `${target.part}.${target.field}`;
+  useEffect(() => {
+    if (!name) return;
+    const frame = requestAnimationFrame(() => {
+      document.querySelector(`[data-field="${name}"]`)?.scrollIntoView?.({ block: "nearest" });
+    });
+    return () => cancelAnimationFrame(frame);
+  }, [name]);
+}

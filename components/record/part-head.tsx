@@ -1,0 +1,15 @@
+import { Subscripted } from "@/components/figures/subscripted";
+
+/** Head of one half of the form. */
+export function PartHead({ title, aside }: { title: string; aside?: string }) {
+  return (
+    <div className="flex h-8 items-center justify-between gap-2 rule-head tablet:h-[34px]">
+      <h2 className="t-head">{title}</h2>
+      {aside && (
+        <span className="text-muted t-label">
+          <Subscripted text={aside} />
+        </span>
+      )}
+    </div>
+  );
+}

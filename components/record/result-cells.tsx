@@ -1,0 +1,52 @@
+"use client";
+
+import { DeltaP } from "@/components/figures/delta";
+import { timeOfDay } from "@/lib/format";
+import { ResultCell } from "./result-cell";
+import { resultWords } from "./result-words";
+import { useRecord } from "./use-record";
+import styles from "./record.module.css";
+
+/** mL/kg and driving pressure, worked out while a person types. */
+export function ResultCells() {
+  const { live, worksheet, mode } = useRecord();
+  const { timeZone } = worksheet.unit;
+  const volume = resultWords(live.volume, {
+    unit: "mL/kg",
+    decimals: 1,
+    timeZone,
+    needs: worksheet.pbwKg === null ? "needs height" : "needs exhaled volume",
+  });
+  const driving = resultWords(live.driving, { unit: "cmH2O", decimals: 0, timeZone, needs: "needs plateau" });
+  const shown = live.ifRelaxed && driving.number !== null ? { ...driving, unit: "if relaxed" } : driving;
+  return (
+    <div
+      className={`${styles.cells} flex items-stretch gap-3 py-1.5 tablet:gap-6`}
+      aria-live="polite"
+      aria-atomic="true"
+    >
+      <ResultCell name="Volume per kg" words={volume} />
+      <div className="flex min-w-0 items-start gap-3 border-l border-hair pl-3 tablet:pl-6">
+        <ResultCell
+          name="Driving pressure"
+          before={<DeltaP className="text-[18px] font-[640]" />}
+          words={mode ? shown : { ...shown, aside: null }}
+        />
+        <HoldTime />
+      </div>
+    </div>
+  );
+}
+
+/** When the hold was that a result still rests on, where it is not this entry's own. */
+function HoldTime() {
+  const { live, worksheet, editing } = useRecord();
+  const { driving } = live;
+  if (driving?.value == null || driving.chartedAt === null) return null;
+  if (Date.parse(driving.chartedAt) === Date.parse(editing.filled.chartedAt)) return null;
+  return (
+    <span className={`${styles.long} ml-auto pt-2 text-right leading-tight text-muted t-label`}>
+      hold at {timeOfDay({ at: driving.chartedAt, timeZone: worksheet.unit.timeZone })}
+    </span>
+  );
+}

@@ -1,0 +1,51 @@
+"use client";
+
+import { timeOfDay } from "@/lib/format";
+import type { NumericSettingField } from "@/lib/physiology";
+import { Button } from "@/components/ui/button";
+import { settingRowsOf } from "./form-fields";
+import { MoreSettings } from "./more-settings";
+import { PartHead } from "./part-head";
+import { SettingRow } from "./setting-row";
+import { useRecord } from "./use-record";
+
+/** The settings of the mode, as far as this person may chart them. */
+export function SettingsPart({ onMode }: { onMode: () => void }) {
+  const { mode, worksheet } = useRecord();
+  const { can } = worksheet;
+  if (can.settingsFields.length === 0) return null;
+  const rows: NumericSettingField[] = mode
+    ? settingRowsOf(mode).filter((field) => can.settingsFields.includes(field))
+    : [];
+  return (
+    <section aria-label="Settings" className="px-4 tablet:px-2">
+      <div className="max-tablet:sr-only">
+        <PartHead title="Set" aside={lastCharted(worksheet)} />
+      </div>
+      {!mode && <FirstMode onMode={can.settingsFields.includes("mode") ? onMode : null} />}
+      {rows.map((field) => (
+        <SettingRow key={field} field={field} />
+      ))}
+      {mode && can.settingsFields.includes("mode") && <MoreSettings mode={mode} />}
+    </section>
+  );
+}
+
+function lastCharted({ settings, unit }: ReturnType<typeof useRecord>["worksheet"]): string {
+  const times = Object.values(settings ?? {}).map(({ chartedAt }) => Date.parse(chartedAt));
+  if (times.length === 0) return "nothing charted";
+  return `last charted ${timeOfDay({ at: Math.max(...times), timeZone: unit.timeZone })}`;
+}
+
+function FirstMode({ onMode }: { onMode: (() => void) | null }) {
+  return (
+    <div className="flex flex-wrap items-center gap-4 py-4">
+      <p className="t-body">No settings were in force at this time.</p>
+      {onMode && (
+        <Button size="entry" look="primary" onClick={onMode}>
+          Choose the mode
+        </Button>
+      )}
+    </div>
+  );
+}
