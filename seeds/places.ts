@@ -30,7 +30,7 @@ const places: Record<UnitKey, Place> = {
   },
 };
 
-export interface BuiltUnit {
+interface BuiltUnit {
   id: string;
   timeZone: string;
   bedIds: ReadonlyMap<string, string>;
