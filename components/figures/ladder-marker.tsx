@@ -38,7 +38,7 @@ function MarkerShape({ state }: { state: State }) {
   const ring = { stroke: "var(--paper)", strokeWidth: 2.5 };
   switch (state) {
     case "outside":
-      return <path data-shape="diamond" d="M0-11L11 0L0 11L-11 0Z" fill="var(--outside)" {...ring} />;
+      return <path data-shape="diamond" d="M0-12L12 0L0 12L-12 0Z" fill="var(--outside)" {...ring} />;
     case "edge":
       return (
         <g data-shape="half-disc">
@@ -59,7 +59,7 @@ function MarkerShape({ state }: { state: State }) {
         />
       );
     case "inside":
-      return <circle data-shape="disc" r="9.5" fill="var(--accent)" {...ring} />;
+      return <circle data-shape="disc" r="10.25" fill="var(--accent)" {...ring} />;
     case "not-asked":
       return <circle data-shape="open-disc" r="8" fill="var(--paper)" stroke="var(--muted)" strokeWidth="2" />;
   }

@@ -50,7 +50,7 @@ export function MiniBar({ scale, shape, reading, peep, hatch }: MiniBarProps) {
 }
 
 /** Bar and cap from left to right, px. */
-export function miniStack({ x }: MiniScale, { base, plateau, mark }: SpanShape): BarStack {
+function miniStack({ x }: MiniScale, { base, plateau, mark }: SpanShape): BarStack {
   const at = mark.at === null ? null : x(mark.at);
   return barStack({ base: x(base), top: x(plateau), mark: at, cap: mark.cap }, measures);
 }

@@ -22,7 +22,7 @@ export type SpanReading =
   /** Nothing to draw: the words alone ('high flow 45 L/min'). */
   | { kind: "words"; words: string };
 
-export interface MeasuredSpan {
+interface MeasuredSpan {
   kind: "measured";
   plateau: number;
   driving: number;
@@ -36,7 +36,7 @@ export interface MeasuredSpan {
 }
 
 /** The last hold, when it is no longer true. It stays where it was measured. */
-export interface UnmeasuredSpan {
+interface UnmeasuredSpan {
   kind: "unmeasured";
   plateau: number;
   /** PEEP under the plateau at the hold; the set PEEP may have moved since. */
@@ -50,14 +50,14 @@ export interface UnmeasuredSpan {
 }
 
 /** A plateau just typed, before the person says how the hold was. */
-export interface DraftSpan {
+interface DraftSpan {
   kind: "draft";
   plateau: number;
   peak?: number | null;
 }
 
 /** A hold with effort, or not sure: no driving pressure comes from it. */
-export interface EffortSpan {
+interface EffortSpan {
   kind: "effort";
   plateau: number;
   peak?: number | null;

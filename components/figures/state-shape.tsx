@@ -9,7 +9,7 @@ export interface StateShapeProps {
 /** The shape of a state beside its word: disc, half disc, diamond, dashed ring. Says nothing by itself. */
 export function StateShape({ state, lastOutside = false }: StateShapeProps) {
   return (
-    <svg width="14" height="14" viewBox="-7 -7 14 14" aria-hidden="true" className="inline-block shrink-0">
+    <svg width="14" height="14" viewBox="-7 -7 14 14" aria-hidden="true" className="inline-block shrink-0 self-center">
       <Shape state={lastOutside ? "last-outside" : state} />
     </svg>
   );

@@ -19,11 +19,11 @@ const words: Record<State, string> = {
 };
 
 const looks: Record<State, string> = {
-  inside: "text-accent",
-  edge: "text-edge bg-edge-soft chip",
-  outside: "text-outside bg-outside-soft chip",
-  unmeasured: "text-unm bg-unm-soft chip",
-  "not-asked": "text-muted font-normal",
+  inside: "t-state text-accent",
+  edge: "t-state text-edge bg-edge-soft chip",
+  outside: "t-state text-outside bg-outside-soft chip",
+  unmeasured: "t-state text-unm bg-unm-soft chip",
+  "not-asked": "t-small text-muted",
 };
 
 /** The word of a state, with its tint and, where asked, its shape. Colour only repeats what the word says. */
@@ -31,7 +31,7 @@ export function StateWord({ state, shape = false, lastOutsideAt }: StateWordProp
   if (state === null) return null;
   if (lastOutsideAt !== undefined) return <LastOutside at={lastOutsideAt} shape={shape} />;
   return (
-    <span data-state={state} className={`inline-flex items-center gap-2 whitespace-nowrap t-state ${looks[state]}`}>
+    <span data-state={state} className={`inline-flex items-baseline gap-2 whitespace-nowrap ${looks[state]}`}>
       {shape && <StateShape state={state} />}
       <span>{words[state]}</span>
     </span>
@@ -40,8 +40,8 @@ export function StateWord({ state, shape = false, lastOutsideAt }: StateWordProp
 
 function LastOutside({ at, shape }: { at: string; shape: boolean }) {
   return (
-    <span data-state="last-outside" className="inline-flex flex-wrap items-center t-state">
-      <span className="inline-flex items-center gap-2 chip bg-outside-soft text-outside">
+    <span data-state="last-outside" className="inline-flex flex-wrap items-baseline t-state">
+      <span className="inline-flex items-baseline gap-2 chip bg-outside-soft text-outside">
         {shape && <StateShape state="outside" lastOutside />}
         <span>outside at {at},</span>
       </span>{" "}

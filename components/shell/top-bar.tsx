@@ -5,7 +5,7 @@ import { DemoChip } from "./demo-chip";
 import { Mark, Wordmark } from "./mark";
 import { ThemeSwitch } from "./theme-switch";
 import { UnitClock } from "./unit-clock";
-import { UserMenu, UserMenuLink } from "./user-menu";
+import { UserMenu, UserMenuLink, UserMenuTheme } from "./user-menu";
 
 export interface TopBarProps {
   /** Which link is this page. */
@@ -69,9 +69,7 @@ export function TopBar({ here, worksheetHref, unit, userName, now, clinical = tr
                 <Link href={href}>{words}</Link>
               </UserMenuLink>
             ))}
-            <div className="px-4 tablet:hidden">
-              <ThemeSwitch className="w-full text-left text-[16px] text-ink" />
-            </div>
+            <UserMenuTheme />
           </UserMenu>
         </span>
         <ThemeSwitch className="hidden tablet:block" />

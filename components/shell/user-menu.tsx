@@ -4,6 +4,7 @@ import { Menu } from "lucide-react";
 import { signOut } from "next-auth/react";
 import { DropdownMenu } from "radix-ui";
 import type { ReactNode } from "react";
+import { ThemeWord, useThemeToggle } from "./theme-switch";
 
 export interface UserMenuProps {
   /** 'M. Okafor, RT' */
@@ -45,6 +46,16 @@ export function UserMenuLink({ children }: { children: ReactNode }) {
   return (
     <DropdownMenu.Item asChild className={`${item} tablet:hidden`}>
       {children}
+    </DropdownMenu.Item>
+  );
+}
+
+/** The theme's switch as an entry, on the phone only. */
+export function UserMenuTheme() {
+  const toggle = useThemeToggle();
+  return (
+    <DropdownMenu.Item className={`${item} tablet:hidden`} onSelect={toggle}>
+      <ThemeWord />
     </DropdownMenu.Item>
   );
 }

@@ -1,11 +1,14 @@
+import { AppFrame } from "@/components/shell/app-frame";
 import { CautionLine } from "@/components/shell/caution-line";
 import { DemoProvider } from "@/components/shell/demo-chip";
 import { LockPanel } from "@/components/shell/lock-panel";
 import { ErrorMessage, ForbiddenMessage, NotFoundMessage } from "@/components/shell/messages";
 import { SignInPanel } from "@/components/shell/sign-in-panel";
+import { ThemeSwitch } from "@/components/shell/theme-switch";
 import { TopBar, type TopBarProps } from "@/components/shell/top-bar";
 import { UnitClock } from "@/components/shell/unit-clock";
 import { render, screen, within } from "@testing-library/react";
+import { renderToString } from "react-dom/server";
 import userEvent from "@testing-library/user-event";
 import { describe, expect, it, vi } from "vitest";
 
@@ -56,6 +59,39 @@ describe("the top bar", () => {
     render(<TopBar {...bar} />);
     await userEvent.click(screen.getByRole("button", { name: /M\. Okafor, RT/ }));
     expect(screen.getByRole("menuitem", { name: "Sign out" })).toBeVisible();
+  });
+
+  it("the menu holds only menu items, links and theme for the phone among them", async () => {
+    render(<TopBar {...bar} />);
+    await userEvent.click(screen.getByRole("button", { name: /M\. Okafor, RT/ }));
+    const menu = screen.getByRole("menu");
+    expect(within(menu).queryByRole("button")).toBeNull();
+    expect(within(menu).getByRole("menuitem", { name: "Beds" })).toHaveAttribute("href", "/beds");
+  });
+});
+
+describe("the theme switch", () => {
+  it("turns the page to night and back, and remembers it on this device", async () => {
+    vi.stubGlobal("matchMedia", () => ({
+      matches: false,
+      addListener: () => undefined,
+      removeListener: () => undefined,
+    }));
+    const switcher = (
+      <AppFrame demo={false}>
+        <ThemeSwitch />
+      </AppFrame>
+    );
+    // As the server sends it: the theme's script runs before the page, never from the client.
+    const container = document.body.appendChild(document.createElement("div"));
+    container.innerHTML = renderToString(switcher);
+    render(switcher, { container, hydrate: true });
+    const page = document.documentElement;
+    await userEvent.click(screen.getByRole("button"));
+    expect(page).toHaveAttribute("data-theme", "night");
+    expect(localStorage.getItem("theme")).toBe("night");
+    await userEvent.click(screen.getByRole("button"));
+    expect(page).toHaveAttribute("data-theme", "day");
   });
 });
 
