@@ -12,7 +12,7 @@ interface Round {
   observations: ObservationsValues;
 }
 
-/** A day back and more the story is told in wider steps: seeding stays short. */
+/** More than a day back the story is told in wider steps and fewer entries: seeding stays short. */
 const RECENT_HOURS = 24;
 const EVERY_HOURS = 4;
 const EVERY_HOURS_EARLIER = 8;
@@ -43,15 +43,11 @@ function roundAt(hoursAgo: number, round: number, { therapist, nurse, mechanics,
     systolicMmHg: 4 * swayOf(round, 6),
     mapMmHg: 2 * swayOf(round, 6),
   });
-  const between = {
-    hoursAgo: hoursAgo - EVERY_HOURS / 2,
-    by: nurse,
-    observations: moved(observations, { heartRate: -2 }),
-  };
+  if (hoursAgo > RECENT_HOURS) return [{ hoursAgo, by: therapist, mechanics: reading, observations: seen }];
   return [
     { hoursAgo, by: therapist, mechanics: reading, check: true },
     { hoursAgo: hoursAgo - 0.2, by: nurse, observations: seen },
-    ...(hoursAgo > RECENT_HOURS ? [] : [between]),
+    { hoursAgo: hoursAgo - EVERY_HOURS / 2, by: nurse, observations: moved(observations, { heartRate: -2 }) },
   ];
 }
 
@@ -63,7 +59,7 @@ function timesOf({ from, to }: Round): number[] {
   return times;
 }
 
-/** The therapist measures and checks, the nurse notes what the monitor shows, then and in between. */
+/** The therapist measures and checks, the nurse notes what the monitor shows, then and in between; earlier in one. */
 export function rounds(plan: Round): StoryEvent[] {
   return timesOf(plan).flatMap((hoursAgo, round) => roundAt(hoursAgo, round, plan));
 }
