@@ -70,16 +70,16 @@ function outsideRun(scene: Scene, series: Series, { index, reading: last }: Foun
 }
 
 /** A2: readings judged outside after a moment, oldest first. */
-function excursionsAfter(scene: Scene, series: Series, t: number): Excursion[] {
+function excursionsAfter(scene: Scene, series: Series, after: number): Excursion[] {
   const found: Excursion[] = [];
-  for (let index = series.count - 1; index >= 0; index--) {
+  let startsNext = true;
+  for (let index = 0; index < series.count; index++) {
     const reading = series.read(index);
     if (!couldBeJudged(scene, series, reading)) continue;
+    const { t, value } = reading;
     const outside = verdictOf(series, reading, false).state === "outside";
-    if (found[0] && !outside) found[0].starts = true;
-    if (reading.t <= t) break;
-    const excursion = { t: reading.t, recordedAt: recordedOf(reading), value: reading.value!, starts: false };
-    if (outside) found.unshift(excursion);
+    if (outside && t > after) found.push({ t, recordedAt: recordedOf(reading), value: value!, starts: startsNext });
+    startsNext = !outside;
   }
   return found;
 }
