@@ -24,20 +24,26 @@ export function EntryRow({ entry, sheet, supersededBy }: EntryRowProps) {
   const close = () => setOpen(null);
   return (
     <li className="py-3 rule-row">
-      <p className="text-muted t-label">
+      <p className="t-label text-muted">
         {dayAndDate({ at: entry.chartedAt, timeZone })} {timeOfDay({ at: entry.chartedAt, timeZone })},{" "}
         {entry.author.name}
         {late && `, charted late at ${timeOfDay({ at: entry.recordedAt, timeZone })}`}
       </p>
-      <p className={`t-body ${struck ? "text-muted line-through" : ""}`}>
-        <Subscripted text={entryWords(entry)} />
+      <p className="t-body">
+        {struck ? (
+          <del className="text-muted">
+            <Subscripted text={entryWords(entry)} />
+          </del>
+        ) : (
+          <Subscripted text={entryWords(entry)} />
+        )}
       </p>
       {struck && <Struck by={supersededBy} timeZone={timeZone} />}
       {entry.correction === "replace" && (
-        <p className="text-muted t-label">Corrects an earlier entry: {entry.reason}</p>
+        <p className="t-label text-muted">Corrects an earlier entry: {entry.reason}</p>
       )}
-      {entry.correction === "void" && <p className="text-muted t-label">Voids an earlier entry: {entry.reason}</p>}
-      {!entry.correction && entry.reason && <p className="text-muted t-label">Reason: {entry.reason}</p>}
+      {entry.correction === "void" && <p className="t-label text-muted">Voids an earlier entry: {entry.reason}</p>}
+      {!entry.correction && entry.reason && <p className="t-label text-muted">Reason: {entry.reason}</p>}
       {mayCorrect && open === null && (
         <p className="flex gap-2 pt-1">
           {entry.kind !== "settings-checks" && <SmallButton onClick={() => setOpen("correct")}>Correct</SmallButton>}
@@ -51,10 +57,10 @@ export function EntryRow({ entry, sheet, supersededBy }: EntryRowProps) {
 }
 
 function Struck({ by, timeZone }: { by: Entry | undefined; timeZone: string }) {
-  if (!by) return <p className="text-outside t-label">Struck through by a later entry.</p>;
+  if (!by) return <p className="t-label text-outside">Struck through by a later entry.</p>;
   const verb = by.correction === "void" ? "Voided" : "Corrected";
   return (
-    <p className="text-outside t-label">
+    <p className="t-label text-outside">
       {verb} by {by.author.name} at {timeOfDay({ at: by.recordedAt, timeZone })}: {by.reason}
     </p>
   );
@@ -62,7 +68,7 @@ function Struck({ by, timeZone }: { by: Entry | undefined; timeZone: string }) {
 
 function SmallButton({ onClick, children }: { onClick: () => void; children: string }) {
   return (
-    <button type="button" className="min-h-[44px] pr-4 text-accent underline t-state" onClick={onClick}>
+    <button type="button" className="min-h-[44px] pr-4 t-state text-accent underline" onClick={onClick}>
       {children}
     </button>
   );

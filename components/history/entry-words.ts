@@ -1,5 +1,5 @@
-import { unitOf, wordsOf, type Entry } from "@/lib/contracts";
-import { chartedRanges, modeLabel, ventilationModes, type ChartedField } from "@/lib/physiology";
+import { mechanicsFields, unitOf, wordsOf, type Entry } from "@/lib/contracts";
+import { chartedRanges, modeLabel, settingFields, ventilationModes, type ChartedField } from "@/lib/physiology";
 
 const holdWords: Record<string, string> = {
   relaxed: "hold relaxed",
@@ -37,11 +37,17 @@ function fieldWords(field: string, value: unknown): string | null {
   return [wordsOf(field), text, unitOf(field)].filter((part) => part !== "").join(" ");
 }
 
+/** Mode, then the settings and readings in the order a form shows them; what has no place of its own stays last. */
+const formOrder: readonly string[] = ["mode", ...settingFields, ...mechanicsFields];
+
+const rankOf = (field: string) => (formOrder.includes(field) ? formOrder.indexOf(field) : formOrder.length);
+
 /** What an entry charts, in form order, for the history and the corrections. */
 export function entryWords(entry: Pick<Entry, "kind" | "body" | "correction">): string {
   if (entry.correction === "void" || !entry.body) return "Voided";
   if (entry.kind === "settings-checks") return "Settings checked, unchanged";
   const words = Object.entries(entry.body)
+    .toSorted(([a], [b]) => rankOf(a) - rankOf(b))
     .filter(([field]) => field !== "chartedAt" && field !== "reason")
     .map(([field, value]) => (value === null ? null : fieldWords(field, value)))
     .filter((each) => each !== null);

@@ -20,7 +20,7 @@ export function FormFoot({ verb, ready, sending, tryNumber, refusal, onCancel }:
         </p>
       )}
       {sending && tryNumber > 1 && (
-        <p role="status" className="text-unm t-small">
+        <p role="status" className="t-small text-unm">
           Kept on this device. Sending, try {tryNumber}. Keep this page open.
         </p>
       )}

@@ -2,6 +2,7 @@ import { Button } from "@/components/ui/button";
 import { SideSheet } from "@/components/ui/side-sheet";
 import type { Worksheet } from "@/lib/contracts";
 import { useEntries } from "@/lib/client/use-entries";
+import { calendarDate } from "@/lib/format";
 import { EntryRow } from "./entry-row";
 import type { HistoryOf } from "./history-of";
 
@@ -15,8 +16,8 @@ interface HistorySheetProps {
 export function HistorySheet({ sheet, of, onClose }: HistorySheetProps) {
   return (
     <SideSheet open={of !== null} onClose={onClose} title={of ? `History of ${of.label}` : ""}>
-      <p className="text-muted t-small">
-        {sheet.patient.name}, MRN {sheet.patient.mrn}
+      <p className="t-small text-muted">
+        {sheet.patient.name}, born {calendarDate(sheet.patient.birthDate)}, MRN {sheet.patient.mrn}
       </p>
       {of && <Entries sheet={sheet} of={of} />}
     </SideSheet>
@@ -29,7 +30,7 @@ function Entries({ sheet, of }: { sheet: Worksheet; of: HistoryOf }) {
     filter: { kind: of.kind, ...(of.field && { field: of.field }) },
   });
   const entries = data?.pages.flatMap((page) => page.entries) ?? [];
-  if (isPending) return <p className="py-4 text-muted t-body">Loading the history…</p>;
+  if (isPending) return <p className="py-4 t-body text-muted">Loading the history…</p>;
   return (
     <>
       {isError && (
@@ -40,7 +41,7 @@ function Entries({ sheet, of }: { sheet: Worksheet; of: HistoryOf }) {
           </button>
         </p>
       )}
-      {entries.length === 0 && !isError && <p className="py-4 text-muted t-body">Nothing has been charted yet.</p>}
+      {entries.length === 0 && !isError && <p className="py-4 t-body text-muted">Nothing has been charted yet.</p>}
       <ol>
         {entries.map((entry) => (
           <EntryRow

@@ -21,9 +21,9 @@ export function LastCharted({ sheet, onHistory }: { sheet: Worksheet; onHistory:
   const entries = data?.pages[0]?.entries.slice(0, shownEntries) ?? [];
   return (
     <section aria-label="Charted last" className="pt-6">
-      <h2 className="text-muted t-label">Charted last</h2>
-      {isPending && <p className="py-2 text-muted t-small">Loading…</p>}
-      {!isPending && entries.length === 0 && <p className="py-2 text-muted t-small">Nothing has been charted yet.</p>}
+      <h2 className="t-label text-muted">Charted last</h2>
+      {isPending && <p className="py-2 t-small text-muted">Loading…</p>}
+      {!isPending && entries.length === 0 && <p className="py-2 t-small text-muted">Nothing has been charted yet.</p>}
       <ol>
         {entries.map((entry) => (
           <li key={entry.id}>
@@ -33,7 +33,7 @@ export function LastCharted({ sheet, onHistory }: { sheet: Worksheet; onHistory:
               className="w-full py-2 text-left rule-row hover:bg-paper"
               onClick={() => onHistory({ label: kindLabels[entry.kind], kind: entry.kind })}
             >
-              <span className="block text-muted t-label">
+              <span className="block t-label text-muted">
                 {timeOfDay({ at: entry.chartedAt, timeZone: sheet.unit.timeZone })}, {entry.author.name}
               </span>
               <span className={`block t-small ${entry.supersededById ? "text-muted line-through" : ""}`}>

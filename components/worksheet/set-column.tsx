@@ -8,14 +8,12 @@ import { SheetCell, SheetNumber } from "./sheet-cell";
 
 interface SetColumnProps {
   sheet: Worksheet;
-  /** Opens the record form focused on a setting. */
-  onEnter: (field: string) => void;
   onHistory: (of: HistoryOf) => void;
 }
 
 /** What the ventilator is set to, and since when each value has stood. */
-export function SetColumn({ sheet, onEnter, onHistory }: SetColumnProps) {
-  const { settings, unit, can } = sheet;
+export function SetColumn({ sheet, onHistory }: SetColumnProps) {
+  const { settings, unit, can, patient } = sheet;
   const mode = modeOf(sheet);
   const rows = settingRows(mode, (field) => settings?.[field] !== undefined);
   return (
@@ -24,12 +22,12 @@ export function SetColumn({ sheet, onEnter, onHistory }: SetColumnProps) {
       {rows.length === 0 && <p className="py-4 text-muted t-body">No settings charted yet.</p>}
       {rows.map(({ field, label, unit: unitWords, decimals }) => {
         const value = settings?.[field]?.value;
-        const open = can.settingsFields.includes(field) ? () => onEnter(field) : undefined;
+        const href = can.settingsFields.includes(field) ? `/patients/${patient.id}/record?focus=${field}` : undefined;
         return (
           <SheetCell
             key={field}
             label={flowLabel(field, label, sheet)}
-            onOpen={open}
+            href={href}
             opens={`opens the entry form at ${label}`}
           >
             {typeof value === "number" ? (

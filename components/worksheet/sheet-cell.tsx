@@ -1,3 +1,4 @@
+import Link from "next/link";
 import type { ReactNode } from "react";
 import { Quantity } from "@/components/figures/quantity";
 import { Subscripted } from "@/components/figures/subscripted";
@@ -7,14 +8,16 @@ interface SheetCellProps {
   /** Age, arithmetic or last value, at the label's right. */
   aside?: ReactNode;
   /** Opens what is behind the number. */
-  onOpen?: () => void;
+  onOpen?: (() => void) | undefined;
+  /** Leads to where the number is charted. */
+  href?: string | undefined;
   /** What opening shows, for a screen reader: 'history of PEEP'. */
   opens?: string;
   children: ReactNode;
 }
 
 /** One quantity of the sheet: label and aside above, the number and its judgement below. */
-export function SheetCell({ label, aside, onOpen, opens, children }: SheetCellProps) {
+export function SheetCell({ label, aside, onOpen, href, opens, children }: SheetCellProps) {
   const body = (
     <>
       <span className="flex min-h-[19px] items-baseline justify-between gap-2 text-muted t-label">
@@ -27,6 +30,14 @@ export function SheetCell({ label, aside, onOpen, opens, children }: SheetCellPr
     </>
   );
   const frame = "block w-full rule-row px-0 py-px text-left min-h-[51px] max-desk:min-h-[53px]";
+  if (href) {
+    return (
+      <Link href={href} className={`${frame} hover:bg-surface`}>
+        {body}
+        <span className="sr-only">, {opens}</span>
+      </Link>
+    );
+  }
   if (!onOpen) return <div className={frame}>{body}</div>;
   return (
     <button type="button" className={`${frame} hover:bg-surface`} onClick={onOpen} aria-haspopup="dialog">

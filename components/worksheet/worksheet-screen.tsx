@@ -1,7 +1,6 @@
 "use client";
 
 import Link from "next/link";
-import { useRouter } from "next/navigation";
 import { useState } from "react";
 import { VolumeLadder } from "@/components/figures/volume-ladder";
 import type { HistoryOf } from "@/components/history/history-of";
@@ -29,8 +28,6 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
   const now = useServerNow(sheet.at);
   const [history, setHistory] = useState<HistoryOf | null>(null);
   const [whereFrom, setWhereFrom] = useState<DerivedRow | null>(null);
-  const router = useRouter();
-  const enter = (field: string) => router.push(`/patients/${sheet.patient.id}/record?focus=${field}`);
   const hours = Math.max(0, Math.floor((now - Date.parse(sheet.episode.intubatedAt)) / 3_600_000));
   return (
     <>
@@ -42,7 +39,7 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
           <Ladder sheet={sheet} />
           <div className="grid tablet:grid-cols-[158px_306px_1fr_204px] desk:grid-cols-[184px_304px_1fr_222px]">
             <div className="tablet:pr-2.5">
-              <SetColumn sheet={sheet} onEnter={enter} onHistory={setHistory} />
+              <SetColumn sheet={sheet} onHistory={setHistory} />
             </div>
             <div className={ruled}>
               <MeasuredColumn sheet={sheet} now={now} onHistory={setHistory} />
