@@ -19,10 +19,10 @@ export interface FreshnessProps {
 /** How fresh a value is, in words: an age, when it fell due, or since when and why it is not measured. */
 export function Freshness(props: FreshnessProps) {
   const { freshness, age, since } = props;
-  if (freshness === "current") return <span className="whitespace-nowrap text-muted t-label">{age}</span>;
+  if (freshness === "current") return <span className="t-label whitespace-nowrap text-muted">{age}</span>;
   if (freshness === "due") {
     return (
-      <span className="whitespace-nowrap text-muted t-label">
+      <span className="t-label whitespace-nowrap text-muted">
         <b className="font-[640] text-ink">{since ? `due since ${since}` : "due"}</b>
         {age && `, ${age}`}
       </span>
@@ -37,7 +37,7 @@ function NotMeasured(props: FreshnessProps) {
   return (
     <span className="inline-flex flex-wrap items-baseline gap-x-2">
       <span className={chip}>not measured</span>{" "}
-      <span className="whitespace-nowrap text-unm t-label">{reason(props, true)}</span>
+      <span className="t-label whitespace-nowrap text-unm">{reason(props, true)}</span>
     </span>
   );
 }

@@ -39,7 +39,7 @@ export function VolumeLadder({ action, ...ladder }: VolumeLadderProps & { action
 function NoHeight({ action }: { action?: ReactNode }) {
   return (
     <div className="flex flex-wrap items-center gap-4 py-3">
-      <p className="text-unm t-body">Measure height to see millilitres</p>
+      <p className="t-body text-unm">Measure height to see millilitres</p>
       {action}
     </div>
   );

@@ -7,7 +7,7 @@ import { useDemo } from "./demo-chip";
 export function CautionLine() {
   const demo = useDemo();
   return (
-    <footer className="z-20 flex shrink-0 items-center justify-between gap-6 border-t border-hair bg-paper page-margin py-3 text-ink t-label tablet:sticky tablet:bottom-0 tablet:h-6 tablet:py-0 tablet:whitespace-nowrap desk:h-7">
+    <footer className="z-20 flex shrink-0 items-center justify-between gap-6 border-t border-hair bg-paper page-margin py-3 t-label text-ink tablet:sticky tablet:bottom-0 tablet:h-6 tablet:py-0 tablet:whitespace-nowrap desk:h-7">
       <p className="min-w-0 tablet:truncate">{cautionLine}</p>
       {demo && <p className="hidden shrink-0 text-muted desk:block">Demo data, invented people</p>}
     </footer>

@@ -15,7 +15,7 @@ export function DemoPeople({ people, filled, onFill }: DemoPeopleProps) {
   return (
     <section aria-labelledby="demo-people" className="mt-4 desk:mt-6">
       <h2 id="demo-people" className="border-b border-hair pb-1.5 t-head">
-        Demo people <span className="ml-1 text-muted t-label">one tap fills the form</span>
+        Demo people <span className="ml-1 t-label text-muted">one tap fills the form</span>
       </h2>
       <ul>
         {people.map((person) => (
@@ -29,7 +29,7 @@ export function DemoPeople({ people, filled, onFill }: DemoPeopleProps) {
               {person.email === filled ? (
                 <span className="text-[15px] font-[640] text-accent">filled in</span>
               ) : (
-                <span className="text-muted t-label">{person.email}</span>
+                <span className="t-label text-muted">{person.email}</span>
               )}
             </button>
           </li>

@@ -13,19 +13,19 @@ export function DoorFrame({ children }: { children: ReactNode }) {
           <Wordmark />
           <DemoChip />
         </div>
-        <p className="mt-9 hidden text-ink t-display tablet:block desk:text-[46px]">
+        <p className="mt-9 hidden t-display text-ink tablet:block desk:text-[46px]">
           The tide with
           <br />
           the smallest rise.
         </p>
-        <p className="mt-3 mb-4 max-w-[30ch] text-muted t-body tablet:max-w-[400px] tablet:text-[18px]">
+        <p className="mt-3 mb-4 max-w-[30ch] t-body text-muted tablet:max-w-[400px] tablet:text-[18px]">
           A bedside worksheet for ventilator settings and lung protection.
         </p>
         <NeapDrawing className="mt-auto hidden max-w-[708px] tablet:block" />
       </section>
       <section className="flex flex-col justify-center border-hair bg-surface px-4 py-6 tablet:w-[428px] tablet:border-l tablet:px-11 tablet:py-3 desk:w-[602px] desk:px-[84px]">
         {children}
-        <div className="mt-5 border-t-2 border-ink pt-3 text-ink t-small">
+        <div className="mt-5 border-t-2 border-ink pt-3 t-small text-ink">
           <p className="font-[640]">{cautionFull.lead}</p>
           <p>{cautionFull.rest}</p>
         </div>

@@ -26,7 +26,7 @@ export function LockPanel({ name, onUnlock, onSomeoneElse, busy, waitSeconds = 0
   return (
     <>
       <h1 className="text-[28px] leading-tight font-[700]">Locked</h1>
-      <p className="mt-2 text-muted t-body">
+      <p className="mt-2 t-body text-muted">
         Nobody touched this page for 15 min. What was typed is kept for <b className="font-[640] text-ink">{name}</b>.
       </p>
       <form onSubmit={submit} className="mt-5 flex flex-col gap-4">

@@ -21,7 +21,7 @@ export function MessagePage({ title, children, actions }: MessagePageProps) {
       </header>
       <main className="flex flex-1 flex-col page-margin pt-12">
         <h1 className="t-display max-tablet:text-[32px]">{title}</h1>
-        <div className="mt-4 max-w-[56ch] text-muted t-body">{children}</div>
+        <div className="mt-4 max-w-[56ch] t-body text-muted">{children}</div>
         {actions && <div className="mt-6 flex flex-wrap gap-3">{actions}</div>}
         <NeapDrawing className="mt-auto max-w-[460px] pt-10 opacity-60" />
       </main>

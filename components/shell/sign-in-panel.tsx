@@ -63,7 +63,7 @@ export function SignInPanel({ onSignIn, busy, waitSeconds = 0, problem, title = 
           {buttonWords(busy, waitSeconds)}
         </Button>
       </form>
-      <p className="mt-2 text-muted t-label">Locked after 15 min idle; typing is kept</p>
+      <p className="mt-2 t-label text-muted">Locked after 15 min idle; typing is kept</p>
       {demo && <DemoPeople people={demo.people} filled={filled} onFill={fill} />}
     </>
   );

@@ -30,7 +30,7 @@ export function UserMenu({ name, children }: UserMenuProps) {
           align="end"
           className="z-50 min-w-[220px] border-[1.5px] border-rule bg-surface py-1 font-words"
         >
-          <DropdownMenu.Label className="px-4 py-2 text-muted t-label">{name}</DropdownMenu.Label>
+          <DropdownMenu.Label className="px-4 py-2 t-label text-muted">{name}</DropdownMenu.Label>
           {children}
           <DropdownMenu.Item className={item} onSelect={() => void signOut({ callbackUrl: "/sign-in" })}>
             Sign out

@@ -16,8 +16,8 @@ export function Banner({ title, children, actions }: BannerProps) {
         </svg>
       </div>
       <div className="min-w-0 flex-1">
-        <h2 className="text-ink t-title">{title}</h2>
-        {children && <div className="text-ink t-body">{children}</div>}
+        <h2 className="t-title text-ink">{title}</h2>
+        {children && <div className="t-body text-ink">{children}</div>}
       </div>
       {actions && <div className="flex shrink-0 items-center gap-3">{actions}</div>}
     </section>

@@ -5,7 +5,7 @@ export function EmptyState({ title, children, action }: { title: string; childre
   return (
     <section className="page-margin py-12">
       <h2 className="t-title">{title}</h2>
-      {children && <div className="mt-2 max-w-[60ch] text-muted t-body">{children}</div>}
+      {children && <div className="mt-2 max-w-[60ch] t-body text-muted">{children}</div>}
       {action && <div className="mt-5">{action}</div>}
     </section>
   );

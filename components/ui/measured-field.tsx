@@ -46,7 +46,7 @@ export function MeasuredField({ label, text, onChange, onOpen, typing = false, w
         )}
       </div>
       {error && (
-        <p id={id} className="mt-1 font-[560] text-outside t-label">
+        <p id={id} className="mt-1 t-label font-[560] text-outside">
           {error}
         </p>
       )}

@@ -14,7 +14,7 @@ export function TextField({ label, hint, error, className = "", ...input }: Text
   const said = [error && `${id}-error`, hint && `${id}-hint`].filter(Boolean).join(" ");
   return (
     <div className={className}>
-      <label htmlFor={id} className="mb-1 block text-muted t-label">
+      <label htmlFor={id} className="mb-1 block t-label text-muted">
         {label}
       </label>
       <input
@@ -25,12 +25,12 @@ export function TextField({ label, hint, error, className = "", ...input }: Text
         {...input}
       />
       {hint && (
-        <p id={`${id}-hint`} className="mt-1 text-muted t-label">
+        <p id={`${id}-hint`} className="mt-1 t-label text-muted">
           {hint}
         </p>
       )}
       {error && (
-        <p id={`${id}-error`} className="mt-1 font-[560] text-outside t-small">
+        <p id={`${id}-error`} className="mt-1 t-small font-[560] text-outside">
           {error}
         </p>
       )}
