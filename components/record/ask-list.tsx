@@ -28,7 +28,7 @@ export function AskList({ wanted }: { wanted: number }) {
           aria-label={question}
           className="flex flex-wrap items-center justify-end gap-2 py-1.5"
         >
-          <p className="min-w-[180px] flex-1 font-[560] t-body">
+          <p className="min-w-[180px] flex-1 t-body font-[560]">
             <Subscripted text={question} />
           </p>
           <Button size="entry" onClick={() => answer(key, true)}>

@@ -10,7 +10,7 @@ interface ChoiceRowProps<Value extends string> {
 export function ChoiceRow<Value extends string>({ label, choices, columns, value, onChange }: ChoiceRowProps<Value>) {
   return (
     <fieldset>
-      <legend className="pb-1 text-muted t-label">{label}</legend>
+      <legend className="pb-1 t-label text-muted">{label}</legend>
       <div className={`grid gap-2 ${columns === 2 ? "grid-cols-2" : ""}`}>
         {choices.map((choice) => (
           <label

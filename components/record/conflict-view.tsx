@@ -123,7 +123,7 @@ function Side({ name, value, by, chosen, onChoose }: SideProps) {
         </b>
         <Quantity text={value} className="n-cell" />
       </span>
-      <span className="block text-muted t-label">{by}</span>
+      <span className="block t-label text-muted">{by}</span>
     </button>
   );
 }

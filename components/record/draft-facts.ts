@@ -4,7 +4,7 @@ import type { FactBase, Facts } from "@/lib/protocol/facts";
 /** Entry id of what a person is still typing. */
 export const draftId = "draft";
 
-const lastMoment = new Date(8.64e15);
+const lastMoment = "9999-12-31T00:00:00Z";
 
 type Charted = Pick<BedsideEntryBody, "chartedAt" | "settings" | "mechanics" | "observations">;
 

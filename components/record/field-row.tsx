@@ -31,12 +31,12 @@ export function FieldRow({ label, name, sub, bar = null, tall = false, error, er
           <span className="block text-[17px] font-[620]">
             <Subscripted text={label} />
           </span>
-          {sub && <span className="block text-muted t-label">{sub}</span>}
+          {sub && <span className="block t-label text-muted">{sub}</span>}
         </div>
         {children}
       </div>
       {error && (
-        <p id={errorId} role="alert" className="pb-2 font-[560] text-outside t-small">
+        <p id={errorId} role="alert" className="pb-2 t-small font-[560] text-outside">
           <Subscripted text={error} />
         </p>
       )}

@@ -79,7 +79,7 @@ export function HeightForm({ onDone }: { onDone: () => void }) {
       />
       {check.asks && !values.confirmed && (
         <div role="group" aria-label="To confirm" className="flex flex-wrap items-center gap-3">
-          <p className="flex-1 font-[560] t-body">{check.asks}</p>
+          <p className="flex-1 t-body font-[560]">{check.asks}</p>
           <Button size="entry" onClick={() => setValue("confirmed", true)}>
             Yes, that is right
           </Button>
@@ -137,7 +137,7 @@ function Length({ control, values, check, onFeet }: LengthProps) {
         </Button>
       )}
       {check.refusal && (
-        <p role="alert" className="w-full font-[560] text-outside t-small">
+        <p role="alert" className="w-full t-small font-[560] text-outside">
           {check.refusal}
         </p>
       )}

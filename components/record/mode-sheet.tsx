@@ -38,7 +38,7 @@ export function ModeSheet({ open, onClose }: { open: boolean; onClose: () => voi
               className={`flex min-h-14 w-full items-center justify-between gap-4 rounded-[8px] px-4 text-left ${each === mode ? "border-[2.5px] border-accent bg-accent-soft" : "control"}`}
             >
               <b className="text-[18px] font-[680] whitespace-nowrap">{modeLabel(each)}</b>
-              <span className="text-muted t-small">{kinds[each]}</span>
+              <span className="t-small text-muted">{kinds[each]}</span>
             </button>
           </li>
         ))}

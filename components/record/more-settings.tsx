@@ -17,7 +17,7 @@ export function MoreSettings({ mode }: { mode: VentilationMode }) {
   if (words === "") return null;
   if (!open) {
     return (
-      <button type="button" onClick={() => setOpen(true)} className="min-h-12 py-2 text-left text-accent t-state">
+      <button type="button" onClick={() => setOpen(true)} className="min-h-12 py-2 text-left t-state text-accent">
         {words.charAt(0).toUpperCase() + words.slice(1)}
       </button>
     );

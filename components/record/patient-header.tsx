@@ -41,7 +41,7 @@ export function PatientHeader({ worksheet, onHeight, children }: PatientHeaderPr
               <DemoChip />
             </span>
           </h1>
-          <p className="text-muted t-label">
+          <p className="t-label text-muted">
             {calendarDate(patient.birthDate)}, MRN {patient.mrn}
           </p>
         </div>
@@ -58,7 +58,7 @@ function Pbw({ worksheet, onHeight }: Pick<PatientHeaderProps, "worksheet" | "on
     "shrink-0 text-right tablet:self-stretch tablet:border-l tablet:border-hair tablet:pl-5 tablet:text-left";
   if (!height && can.heights) {
     return (
-      <button type="button" onClick={onHeight} className="min-h-11 shrink-0 rounded-[6px] px-3 control t-state">
+      <button type="button" onClick={onHeight} className="min-h-11 shrink-0 rounded-[6px] px-3 t-state control">
         Measure height
       </button>
     );
@@ -69,7 +69,7 @@ function Pbw({ worksheet, onHeight }: Pick<PatientHeaderProps, "worksheet" | "on
         className="block text-[17px] font-[660]"
         text={pbwKg === null ? "no PBW" : `${displayNumber({ value: pbwKg, decimals: 1 })} kg`}
       />
-      <span className="block text-muted t-label">
+      <span className="block t-label text-muted">
         {height ? `PBW, ${heightWords[height.method].short}` : "no height"}
       </span>
     </>

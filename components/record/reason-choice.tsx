@@ -31,7 +31,7 @@ export function ReasonChoice() {
         )}
       </p>
       {refusal && (
-        <p role="alert" className="pb-1 font-[560] text-outside t-small">
+        <p role="alert" className="pb-1 t-small font-[560] text-outside">
           {refusal}
         </p>
       )}

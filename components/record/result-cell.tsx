@@ -23,13 +23,13 @@ export function ResultCell({ name, before, words }: ResultCellProps) {
         {number !== null ? (
           <>
             <Quantity text={number} className={`${size} leading-[1.1] font-bold`} />
-            <span className="text-muted t-label">
+            <span className="t-label text-muted">
               <Subscripted text={unit} />
             </span>
           </>
         ) : (
           was !== null && (
-            <span className="text-muted t-label">
+            <span className="t-label text-muted">
               was <Quantity text={was} className="text-[20px]" />
             </span>
           )
@@ -37,7 +37,7 @@ export function ResultCell({ name, before, words }: ResultCellProps) {
       </p>
       <p className="flex flex-wrap items-center gap-x-2">
         <StateWord state={state} shape {...(lastOutsideAt && { lastOutsideAt })} />
-        {aside && <span className={`${styles.long} text-muted t-label`}>{aside}</span>}
+        {aside && <span className={`${styles.long} t-label text-muted`}>{aside}</span>}
       </p>
     </div>
   );

@@ -45,7 +45,7 @@ function HoldTime() {
   if (driving?.value == null || driving.chartedAt === null) return null;
   if (Date.parse(driving.chartedAt) === Date.parse(editing.filled.chartedAt)) return null;
   return (
-    <span className={`${styles.long} ml-auto pt-2 text-right leading-tight text-muted t-label`}>
+    <span className={`${styles.long} ml-auto pt-2 text-right t-label leading-tight text-muted`}>
       hold at {timeOfDay({ at: driving.chartedAt, timeZone: worksheet.unit.timeZone })}
     </span>
   );

@@ -41,7 +41,7 @@ export function ResultPanel({ onSave, hindrance }: ResultPanelProps) {
         </div>
       </div>
       {said && blocker && (
-        <p role="alert" className="px-4 pb-2 font-[560] text-outside t-small tablet:px-6">
+        <p role="alert" className="px-4 pb-2 t-small font-[560] text-outside tablet:px-6">
           {blocker}
         </p>
       )}

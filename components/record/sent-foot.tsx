@@ -40,7 +40,7 @@ export function SentFoot({ screen, pending, onNext }: SentFootProps) {
         </Button>
       </div>
       {flow.undoProblem && <ErrorNote>{flow.undoProblem}</ErrorNote>}
-      <p className="flex flex-wrap justify-between gap-x-6 py-1.5 text-muted t-label">
+      <p className="flex flex-wrap justify-between gap-x-6 py-1.5 t-label text-muted">
         <span>{undoWords(pending, flow.sending)}</span>
         <Link href={`/patients/${record.worksheet.patient.id}`} className="min-h-6 text-accent underline">
           Worksheet

@@ -39,11 +39,11 @@ function Result({ name, metric, derived, words, divided = false }: ResultProps) 
   const { number, unit, was, state, aside, lastOutsideAt } = words;
   return (
     <section aria-label={name} className={`flex-1 ${divided ? "border-l border-hair pl-4" : ""}`}>
-      <h3 className="text-muted t-label">{name}</h3>
+      <h3 className="t-label text-muted">{name}</h3>
       <p className="flex min-h-[50px] items-baseline gap-2">
         {number === null ? (
           was !== null && (
-            <span className="text-muted t-body">
+            <span className="t-body text-muted">
               was <Quantity text={was} className="text-[26px]" />
             </span>
           )
@@ -70,7 +70,7 @@ function Result({ name, metric, derived, words, divided = false }: ResultProps) 
       )}
       <p className="flex flex-wrap items-center gap-2 pt-1">
         <StateWord state={state} shape {...(lastOutsideAt && { lastOutsideAt })} />
-        {aside && <span className="text-muted t-label">{aside}</span>}
+        {aside && <span className="t-label text-muted">{aside}</span>}
       </p>
     </section>
   );

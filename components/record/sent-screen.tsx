@@ -86,7 +86,7 @@ function WasNowTable({ pending, before }: { pending: Pending; before: Pick<Works
     <div className={pending.undo === "done" ? "line-through decoration-2" : undefined}>
       <table className="w-full max-w-[760px]">
         <thead>
-          <tr className="border-b-2 border-ink text-muted t-label">
+          <tr className="border-b-2 border-ink t-label text-muted">
             <th scope="col" className="py-2 text-left font-normal">
               At {at}
               {mode && `, ${modeLabel(mode)}`}
@@ -120,7 +120,7 @@ function WasNowTable({ pending, before }: { pending: Pending; before: Pick<Works
           ))}
         </tbody>
       </table>
-      <p className="pt-2 text-muted t-label">All other settings as they were.</p>
+      <p className="pt-2 t-label text-muted">All other settings as they were.</p>
     </div>
   );
 }

@@ -43,7 +43,7 @@ function FirstMode({ onMode }: { onMode: (() => void) | null }) {
       <p className="t-body">No settings were in force at this time.</p>
       {onMode && (
         <Button size="entry" look="primary" onClick={onMode}>
-          Choose the mode
+          Choose a mode
         </Button>
       )}
     </div>

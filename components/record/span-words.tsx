@@ -15,7 +15,7 @@ export function SpanWords() {
   const set = input("peepCmH2O");
   if (plateau === null || (total === null && set === null)) return null;
   return (
-    <p className="pt-3 text-muted t-label">
+    <p className="pt-3 t-label text-muted">
       {total === null
         ? `${write(plateau)} − ${write(set ?? 0)}, the set PEEP: assumes no trapped gas`
         : `${write(plateau)} − ${write(total)}, total PEEP of the same reading`}

@@ -74,7 +74,7 @@ function CheckOrChanged({ onCheck }: { onCheck: () => void }) {
   if (changed.length > 0) {
     return (
       <p className="max-w-[120px] text-right leading-tight">
-        <span className="block text-muted t-label">changed</span>
+        <span className="block t-label text-muted">changed</span>
         <b className="font-[680]">
           <Subscripted text={changed.length > 2 ? `${changed.length} settings` : changed.join(", ")} />
         </b>
