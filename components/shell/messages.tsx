@@ -1,3 +1,5 @@
+"use client";
+
 import { Button } from "@/components/ui/button";
 import { buttonClass } from "@/components/ui/button-class";
 import Link from "next/link";

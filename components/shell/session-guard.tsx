@@ -4,7 +4,6 @@ import { useQueryClient } from "@tanstack/react-query";
 import { signOut } from "next-auth/react";
 import { Dialog } from "radix-ui";
 import type { ReactNode } from "react";
-import { Banner } from "@/components/ui/banner";
 import { useSessionWatch } from "@/lib/client/use-session-watch";
 import { useSignIn } from "@/lib/client/use-sign-in";
 import { useUnlock } from "@/lib/client/use-unlock";
@@ -80,10 +79,12 @@ function Ended({ onOpened }: { onOpened: () => Promise<void> }) {
   return <SignInPanel title="Your session has ended" onSignIn={submit} {...form} />;
 }
 
+/** Slim, and above the page: what is due at the bedside comes first. */
 function EndsSoon({ minutes }: { minutes: number }) {
   return (
-    <Banner title={`This session ends in ${minutes} min`}>
-      Sign-in is asked again then, twelve hours after the last. What is typed stays on this page.
-    </Banner>
+    <p role="status" className="border-b-2 border-ink bg-surface page-margin py-2 text-ink t-small">
+      <b className="font-[640]">This session ends in {minutes} min.</b> Then it asks for your password; what is typed
+      stays on this page.
+    </p>
   );
 }

@@ -139,6 +139,6 @@ describe("the last quarter of an hour", () => {
     );
     expect(screen.queryByText(/This session ends/)).toBeNull();
     await act(() => vi.advanceTimersByTimeAsync(15_000));
-    expect(screen.getByText("This session ends in 12 min")).toBeVisible();
+    expect(screen.getByText("This session ends in 12 min.")).toBeVisible();
   });
 });
