@@ -36,7 +36,10 @@ export async function auditChange(ctx: Ctx, row: UnitRow & Partial<PatientRow>, 
   );
 }
 
-/** Who looked at what: polls of the same screen within a quarter of an hour add nothing. */
+/**
+ * Who looked at what: polls of the same screen within a quarter of an hour add nothing. Called after the reading, since
+ * a second poll waits on this row until the first one's transaction ends.
+ */
 export async function auditRead(ctx: Ctx, row: UnitRow & Partial<PatientRow>, action: string): Promise<void> {
   const window = Math.floor(ctx.now.getTime() / READ_WINDOW_MS);
   const dedupeKey = [action, ctx.actor.userId, row.patientId ?? `unit-${row.unitId}`, window].join(":");

@@ -9,7 +9,7 @@ import { worksheetOf } from "./worksheet-of";
 /** Every right under which something is filed on an episode. */
 export type ChartRight = `${EntryKind}:chart` | "bedside-entries:chart" | "entries:correct";
 
-export async function worksheetNow(ctx: Ctx, row: PatientRow): Promise<Worksheet> {
+async function worksheetNow(ctx: Ctx, row: PatientRow): Promise<Worksheet> {
   return worksheetOf(await readCase(ctx, row, { at: ctx.now }), { bed: row.bed, can: canOf(row) });
 }
 

@@ -98,7 +98,6 @@ function countsOf(beds: readonly JudgedBed[]): Record<string, number> {
 
 /** Every bed of the unit, what needs a look first at the top; free beds last. */
 export async function readBeds(ctx: Ctx, granted: GrantedUnit<"beds:read">): Promise<BedsAnswer> {
-  await auditRead(ctx, granted, "beds.read");
   const unit = await loadUnit({ unitId: granted.unitId, at: ctx.now }, ctx.transaction);
   const beds = await loadBeds(granted.unitId, ctx.transaction);
   const cases = await casesOf(
@@ -106,6 +105,7 @@ export async function readBeds(ctx: Ctx, granted: GrantedUnit<"beds:read">): Pro
     unit,
     beds.flatMap(({ episodeId }) => episodeId ?? []),
   );
+  await auditRead(ctx, granted, "beds.read");
   const judged = beds
     .map((bed) => {
       const patientCase = cases.get(bed.episodeId ?? "");

@@ -58,7 +58,6 @@ export async function readEntries(
   granted: GrantedPatient<"patients:read">,
   { kind, field, before }: HistoryQuery,
 ): Promise<EntriesAnswer> {
-  await auditRead(ctx, granted, "entries.read");
   const filter = {
     episodeId: granted.episodeId,
     kind,
@@ -67,6 +66,7 @@ export async function readEntries(
     limit: PAGE + 1,
   };
   const rows = await loadEntries(filter, ctx.transaction);
+  await auditRead(ctx, granted, "entries.read");
   const page = rows.slice(0, PAGE);
   return { entries: page.map(entryOf), next: rows.length > PAGE ? (page.at(-1)?.id ?? null) : null };
 }

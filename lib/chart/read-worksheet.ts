@@ -28,8 +28,8 @@ export async function readWorksheet(
   granted: GrantedPatient<"patients:read">,
   { at = ctx.now, knownAt, facts = false }: WorksheetQuery = {},
 ): Promise<Worksheet> {
-  await auditRead(ctx, granted, "worksheet.read");
   const patientCase = await readCase(ctx, granted, { at, knownAt });
+  await auditRead(ctx, granted, "worksheet.read");
   const worksheet = worksheetOf(patientCase, { bed: granted.bed, can: canOf(granted) });
   return facts ? { ...worksheet, facts: shownFacts(patientCase.facts) } : worksheet;
 }
