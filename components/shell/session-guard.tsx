@@ -82,7 +82,7 @@ function Ended({ onOpened }: { onOpened: () => Promise<void> }) {
 /** Slim, and above the page: what is due at the bedside comes first. */
 function EndsSoon({ minutes }: { minutes: number }) {
   return (
-    <p role="status" className="border-b-2 border-ink bg-surface page-margin py-2 text-ink t-small">
+    <p role="status" className="border-b-2 border-ink bg-surface page-margin py-2 t-small text-ink">
       <b className="font-[640]">This session ends in {minutes} min.</b> Then it asks for your password; what is typed
       stays on this page.
     </p>
