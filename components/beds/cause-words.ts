@@ -4,7 +4,7 @@ import { displayNumber } from "@/lib/format";
 const metricWords: Record<string, { label: string; decimals: number }> = {
   vtMlPerKg: { label: "VT", decimals: 1 },
   plateauCmH2O: { label: "plateau", decimals: 0 },
-  drivingPressureCmH2O: { label: "driving pressure", decimals: 0 },
+  drivingPressureCmH2O: { label: "ΔP", decimals: 0 },
   spo2Percent: { label: "SpO2", decimals: 0 },
   pao2MmHg: { label: "PaO2", decimals: 0 },
   paco2MmHg: { label: "PaCO2", decimals: 0 },

@@ -6,7 +6,7 @@ export function ColumnHead({ title, aside }: { title: string; aside?: string }) 
     <div className="flex h-[34px] items-center justify-between gap-2 rule-head">
       <h2 className="t-head">{title}</h2>
       {aside && (
-        <span className="text-muted t-label">
+        <span className="t-label text-muted">
           <Subscripted text={aside} />
         </span>
       )}

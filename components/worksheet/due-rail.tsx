@@ -17,11 +17,11 @@ export function DueRail({ sheet, now, onHistory }: DueRailProps) {
       aria-label="Due, and charted last"
       className="w-[332px] shrink-0 border-l border-hair bg-surface px-6 pt-3 pb-12 max-desk:hidden"
     >
-      <h2 className="text-muted t-label">Due</h2>
+      <h2 className="t-label text-muted">Due</h2>
       {due.length === 0 && <p className="py-2 t-head">Nothing is due</p>}
       <ul>
         {due.map((each) => (
-          <li key={each.what} className="py-2 rule-row t-body">
+          <li key={each.what} className="py-2 t-body rule-row">
             <span className={each.overdue ? "font-[640] text-edge" : ""}>
               {dueSentence(each, now, sheet.unit.timeZone)}
             </span>

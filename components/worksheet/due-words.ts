@@ -11,10 +11,14 @@ const names: Record<DueThing["what"], string> = {
   "settings-check": "Settings check",
 };
 
+/** Where a row leaves little room. */
+const shortNames: Partial<typeof names> = { hold: "Hold", gas: "Gas" };
+
 /** 'Hold for plateau due 23:10', 'SpO2 due since 22:50'. */
-export function dueSentence(due: DueThing, now: number, timeZone: string): string {
+export function dueSentence(due: DueThing, now: number, timeZone: string, short = false): string {
   const time = timeOfDay({ at: due.dueAt, timeZone });
-  return Date.parse(due.dueAt) <= now ? `${names[due.what]} due since ${time}` : `${names[due.what]} due ${time}`;
+  const name = (short && shortNames[due.what]) || names[due.what];
+  return Date.parse(due.dueAt) <= now ? `${name} due since ${time}` : `${name} due ${time}`;
 }
 
 /** What people act on first: overdue, longest overdue at the top; then what comes next. SpO2 is named only once overdue. */

@@ -72,7 +72,7 @@ function MeasuredCell({
 }
 
 function Stale({ measured }: { measured: Measured }) {
-  if (measured.notAsked) return <span className="text-muted t-body">not asked</span>;
+  if (measured.notAsked) return <span className="t-body text-muted">not asked</span>;
   if (measured.lastOutsideAt) return <StateWord state="unmeasured" lastOutsideAt={measured.lastOutsideAt} />;
   if (measured.note) return <NotMeasured why={measured.note} />;
   return <Freshness {...measured.freshness} narrow />;

@@ -28,7 +28,7 @@ export function PatientStrip({ sheet, hours, actions }: PatientStripProps) {
               {patient.name}, {patient.ageYears}
               {sex}
             </h1>
-            <p className="text-muted t-label">
+            <p className="t-label text-muted">
               born {calendarDate(patient.birthDate)}, MRN {patient.mrn}, day {episode.day}
               <span className="max-desk:hidden"> ({hours} h)</span>
             </p>
@@ -71,7 +71,7 @@ function HeightCells({ sheet }: { sheet: Worksheet }) {
 function Cell({ label, children }: { label: string; children: ReactNode }) {
   return (
     <div className="flex flex-col justify-center border-l border-hair px-5 py-1.5 max-tablet:border-l-0 max-tablet:px-0 max-tablet:pr-5">
-      <span className="text-muted t-label">{label}</span>
+      <span className="t-label text-muted">{label}</span>
       <span className="t-strip max-tablet:text-[16px]">{children}</span>
     </div>
   );

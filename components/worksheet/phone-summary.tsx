@@ -21,7 +21,7 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
         <Result value={volume?.value ?? null} decimals={1} unit={volume?.unit ?? "mL/kg"} limit={volume?.limit} />
         <PhoneState derived={volume} timeZone={sheet.unit.timeZone} />
         {ordered && (
-          <span className="text-muted t-label">
+          <span className="t-label text-muted">
             {volume?.limit?.origin === "order" ? "ordered" : "default"} {ordered}
           </span>
         )}
@@ -30,7 +30,7 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
       <div className="flex gap-4 pt-3">
         <PressureSpan size="phone" {...spanOf(sheet, now)} />
         <div className="flex-1">
-          <p className="text-muted t-label">Driving pressure</p>
+          <p className="t-label text-muted">Driving pressure</p>
           <Result value={driving?.value ?? null} decimals={0} unit="cmH2O" limit={driving?.limit} />
           <PhoneState derived={driving} timeZone={sheet.unit.timeZone} />
           <OrderWords sheet={sheet} />
@@ -59,7 +59,7 @@ function Result({ value, decimals, unit, limit }: ResultProps) {
   return (
     <p>
       <Quantity text={displayNumber({ value, decimals, limit: limits })} className="n-result" />{" "}
-      <span className="text-muted t-body">{unit}</span>
+      <span className="t-body text-muted">{unit}</span>
     </p>
   );
 }

@@ -19,7 +19,7 @@ export function SetColumn({ sheet, onHistory }: SetColumnProps) {
   return (
     <section aria-label="Set">
       <ColumnHead title="Set" aside={settingsStand(sheet)} />
-      {rows.length === 0 && <p className="py-4 text-muted t-body">No settings charted yet.</p>}
+      {rows.length === 0 && <p className="py-4 t-body text-muted">No settings charted yet.</p>}
       {rows.map(({ field, label, unit: unitWords, decimals }) => {
         const value = settings?.[field]?.value;
         const href = can.settingsFields.includes(field) ? `/patients/${patient.id}/record?focus=${field}` : undefined;
@@ -33,7 +33,7 @@ export function SetColumn({ sheet, onHistory }: SetColumnProps) {
             {typeof value === "number" ? (
               <SheetNumber text={writeSetting(value, decimals)} unit={unitWords} />
             ) : (
-              <span className="text-muted t-body">not charted</span>
+              <span className="t-body text-muted">not charted</span>
             )}
           </SheetCell>
         );
@@ -43,7 +43,7 @@ export function SetColumn({ sheet, onHistory }: SetColumnProps) {
         <button
           type="button"
           aria-haspopup="dialog"
-          className="min-h-[44px] text-accent underline t-state"
+          className="min-h-[44px] t-state text-accent underline"
           onClick={() => onHistory({ label: "settings", kind: "settings" })}
         >
           History of settings

@@ -20,7 +20,7 @@ interface SheetCellProps {
 export function SheetCell({ label, aside, onOpen, href, opens, children }: SheetCellProps) {
   const body = (
     <>
-      <span className="flex min-h-[19px] items-baseline justify-between gap-2 text-muted t-label">
+      <span className="flex min-h-[19px] items-baseline justify-between gap-2 t-label text-muted">
         <span className="shrink-0">
           <Subscripted text={label} />
         </span>
@@ -53,7 +53,7 @@ export function SheetNumber({ text, unit }: { text: string; unit: string }) {
     <span className="whitespace-nowrap">
       <Quantity text={text} className="n-cell" />
       {unit && (
-        <span className="ml-1.5 text-muted t-body max-desk:text-[15px]">
+        <span className="ml-1.5 t-body text-muted max-desk:text-[15px]">
           <Subscripted text={unit} />
         </span>
       )}
@@ -65,8 +65,8 @@ export function SheetNumber({ text, unit }: { text: string; unit: string }) {
 export function NotMeasured({ why }: { why: string | null }) {
   return (
     <span className="inline-flex flex-wrap items-baseline gap-x-2">
-      <span className="chip bg-unm-soft text-unm t-state">not measured</span>
-      {why && <span className="text-unm t-label">{why}</span>}
+      <span className="chip bg-unm-soft t-state text-unm">not measured</span>
+      {why && <span className="t-label text-unm">{why}</span>}
     </span>
   );
 }

@@ -2,7 +2,11 @@ import type { LowWater, PressureSpanProps, SpanReading } from "@/components/figu
 import type { Derived, Worksheet } from "@/lib/contracts";
 import { durationText, timeOfDay } from "@/lib/format";
 
-type Sheet = Pick<Worksheet, "settings" | "mechanics" | "derived" | "targets" | "unit">;
+/** Beds knows no single readings: there the peak is not drawn. */
+type Sheet = Pick<Worksheet, "settings" | "derived"> & {
+  mechanics: Worksheet["mechanics"];
+  unit: Pick<Worksheet["unit"], "timeZone">;
+};
 
 const numberOf = (values: Record<string, { value: unknown }> | null, field: string): number | null => {
   const value = values?.[field]?.value;
@@ -19,7 +23,7 @@ export function spanOf(sheet: Sheet, now: number): Omit<PressureSpanProps, "size
     lowWater: lowWaterOf(sheet, mode),
     reading: readingOf(sheet, mode, now),
     limits: {
-      plateau: sheet.derived.plateauCmH2O?.limit?.max ?? sheet.targets.plateauCmH2O?.max ?? null,
+      plateau: sheet.derived.plateauCmH2O?.limit?.max ?? null,
       driving: sheet.derived.drivingPressureCmH2O?.limit?.max ?? null,
     },
   };

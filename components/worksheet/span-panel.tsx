@@ -1,6 +1,5 @@
 import { PressureSpan } from "@/components/figures/pressure-span";
-import { Subscripted } from "@/components/figures/subscripted";
-import { DeltaP } from "@/components/figures/delta";
+import { TradeText } from "@/components/figures/trade-text";
 import type { Worksheet } from "@/lib/contracts";
 import { timeOfDay } from "@/lib/format";
 import { ColumnHead } from "./column-head";
@@ -24,7 +23,7 @@ export function OrderWords({ sheet }: { sheet: Worksheet }) {
   const { targets, unit } = sheet;
   const ordered = targets.origin === "order" && targets.recordedAt;
   return (
-    <div className="pt-3 leading-[1.4] text-muted t-label">
+    <div className="pt-3 t-label leading-[1.4] text-muted">
       <p>
         <b className="font-[660] text-ink">{ordered ? "Ordered" : "Default"}</b>{" "}
         {ordered
@@ -33,21 +32,9 @@ export function OrderWords({ sheet }: { sheet: Worksheet }) {
       </p>
       {orderLines(targets).map((line) => (
         <p key={line}>
-          <OrderLine text={line} />
+          <TradeText text={line} />
         </p>
       ))}
     </div>
-  );
-}
-
-function OrderLine({ text }: { text: string }) {
-  const [before = "", after] = text.split("ΔP");
-  if (after === undefined) return <Subscripted text={text} />;
-  return (
-    <>
-      <Subscripted text={before} />
-      <DeltaP />
-      <Subscripted text={after} />
-    </>
   );
 }

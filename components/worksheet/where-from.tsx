@@ -38,7 +38,7 @@ function Explained({ row, derived, now, sheet }: { row: DerivedRow; derived: Der
         </p>
       )}
       {derived.value === null && shown !== null && (
-        <p className="text-unm t-body">No longer current: this is the last value.</p>
+        <p className="t-body text-unm">No longer current: this is the last value.</p>
       )}
       <table className="w-full t-small">
         <thead>
@@ -67,9 +67,9 @@ function Explained({ row, derived, now, sheet }: { row: DerivedRow; derived: Der
         </tbody>
       </table>
       {derived.inputs.length === 0 && (
-        <p className="text-muted t-body">Nothing has been charted that it could come from.</p>
+        <p className="t-body text-muted">Nothing has been charted that it could come from.</p>
       )}
-      <p className="text-muted t-small">{derived.source}</p>
+      <p className="t-small text-muted">{derived.source}</p>
     </div>
   );
 }

@@ -93,7 +93,7 @@ function lastWords(row: DerivedRow, derived: Derived, timeZone: string): string 
 }
 
 function Unmeasured({ row, derived, clock }: Pick<DerivedCellProps, "row" | "derived" | "clock">) {
-  if (derived.state === "not-asked") return <span className="text-muted t-body">not asked</span>;
+  if (derived.state === "not-asked") return <span className="t-body text-muted">not asked</span>;
   const lastOutsideAt = lastOutsideTime(derived, clock.timeZone);
   if (lastOutsideAt) return <StateWord state="unmeasured" lastOutsideAt={lastOutsideAt} />;
   const note = noteWords(derived.notes);

@@ -72,14 +72,14 @@ const ruled = "tablet:border-l tablet:border-hair tablet:pr-2.5 tablet:pl-4";
 function Ladder({ sheet }: { sheet: Worksheet }) {
   const ladder = ladderOf(sheet);
   const action = sheet.can.heights ? (
-    <Link href={`/patients/${sheet.patient.id}/record?focus=height`} className="text-accent underline t-state">
+    <Link href={`/patients/${sheet.patient.id}/record?focus=height`} className="t-state text-accent underline">
       Measure height
     </Link>
   ) : undefined;
   return (
     <section aria-label="Volume ladder" className="pt-2 max-tablet:hidden">
-      <p className="text-muted t-label max-desk:hidden">
-        <b className="mr-2 text-ink t-head">Volume ladder</b>
+      <p className="t-label text-muted max-desk:hidden">
+        <b className="mr-2 t-head text-ink">Volume ladder</b>
         {sheet.pbwKg !== null && "this patient’s millilitres at each mL/kg PBW. Shaded: "}
         {sheet.pbwKg !== null && (sheet.targets.origin === "order" ? "ordered." : "the unit’s default.")}
       </p>
