@@ -41,7 +41,8 @@ function bandOf(scene: Scene, gas: Item<BloodGasFact>, ratio: number): Band {
   if (mode === "APRV" || mode === "HFOV") return { ...noBand, notes: ["peep-not-comparable"] };
   const peep = atGas(scene, gas, "peepCmH2O");
   if (!peep) return noBand;
-  const band = berlinSeverity({ pfRatio: ratio, peepCmH2O: peep.value! });
+  const band = computable(() => berlinSeverity({ pfRatio: ratio, peepCmH2O: peep.value! }));
+  if (band === null) return { ...noBand, notes: ["not-computable"] };
   const capped = mode === "NIV" && (band === "moderate" || band === "severe");
   return { band: capped ? "mild" : band, notes: capped ? ["non-invasive-mild-only"] : [], inputs: [peep] };
 }

@@ -3,11 +3,11 @@ import type { State } from "../result";
 import type { Scene } from "../scene";
 import { countUntil, recordedAt } from "../timeline/item";
 import type { VolumePoint } from "../timeline/volume-points";
-import { judgeVolumeMl } from "./judge-volume";
+import { judgeVolumeMl, volumeLimit } from "./judge-volume";
 
 /** V6, F7: what the record of set and measured volumes says at the moment. */
 export interface VolumeRun {
-  /** The newest point that could be judged, and its state. */
+  /** The newest point that could be judged, or the newest where nothing is ordered; and its state. */
   last: VolumePoint | null;
   lastState: State | null;
   /** A measured volume was last outside, and no measured one inside since. */
@@ -41,10 +41,12 @@ export function volumeRun(scene: Scene): VolumeRun {
   const { volumePoints } = scene.line;
   const walk: Walk = { last: null, lastState: null, held: null, run: null, setOutside: false };
   const count = countUntil(volumePoints, scene.at);
+  const ordered = volumeLimit(scene) !== null;
   for (let index = 0; index < count; index++) {
     const point = volumePoints[index]!;
     const { state } = judgeVolumeMl(scene, point.volumeMl, point.isSet);
     if (state !== null) step(walk, point, state);
+    else if (!ordered) walk.last = point;
   }
   return walk;
 }

@@ -147,7 +147,8 @@ function judgeChoice(scene: Scene, base: Judged, choice: Choice, run: VolumeRun)
     alternatives: alternativesOf(scene, choice, verdict),
   };
   if (heldOutside) return { ...judged, notes: [...judged.notes, "exhaled-outside-not-measured-since"] };
-  return readable && verdict.state !== null ? { ...judged, last: reading, lastState: verdict.state } : judged;
+  const judgeable = verdict.state !== null || base.limit === null;
+  return readable && judgeable ? { ...judged, last: reading, lastState: verdict.state } : judged;
 }
 
 /** V6, V12, F7, S2: the volume judged, in mL/kg, or in mL by an order in mL. */

@@ -180,6 +180,18 @@ describe("predicted body weight", () => {
     expect(metric(name, "09:00", fits).state).toBe("edge");
   });
 
+  it("V6 a volume that nobody ordered is shown and not judged, and its last value stays", () => {
+    const targets = { vtMlPerKg: null };
+    const shown = metric(name, "09:00", { targets });
+    expect(shown).toMatchObject({ state: null, limit: null, freshness: "current", lastState: null });
+    expect(shown.lastValue).toBe(shown.value);
+    const changed = {
+      settings: [settings("08:00", pressureControl), settings("10:30", { peepCmH2O: 12 })],
+    };
+    const stale = metric(name, "10:40", { ...inMode(pressureControl, [exhaled("10:00", 420)], changed), targets });
+    expect(stale).toMatchObject({ value: null, freshness: "changed-since", lastValue: 420 / pbwKg });
+  });
+
   it("V12 the newest height and the newest sex hold", () => {
     const heights = [
       fact("07:00", { heightCm: 165, sexForPbw: "male", method: "reported" }),
