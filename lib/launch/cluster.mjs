@@ -1,14 +1,17 @@
-import { openSync, closeSync } from "node:fs";
-import { mkdir, readFile, rename, rm, stat, writeFile } from "node:fs/promises";
-import { basename, join } from "node:path";
+import { closeSync, openSync } from "node:fs";
+import { readFile, rm, stat, writeFile } from "node:fs/promises";
+import { join } from "node:path";
 import { setTimeout as sleep } from "node:timers/promises";
+import { choosePort } from "./cluster-port.mjs";
 import { atEnd } from "./lifetime.mjs";
-import { freePort, isFree } from "./ports.mjs";
+import { makeCluster } from "./make-cluster.mjs";
+import { endOrphanedServer } from "./orphaned-postgres.mjs";
+import { isFree } from "./ports.mjs";
+import { postgresEnvironment } from "./postgres-environment.mjs";
 import { postgresPrograms } from "./postgres-programs.mjs";
-import { capture, start, stop } from "./processes.mjs";
+import { start, stop } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
 import { secret } from "./secrets.mjs";
-import { commandLine, endProcesses, processesWhere } from "./system-processes.mjs";
 import { unprivileged } from "./unprivileged.mjs";
 
 const START_TIMEOUT_MS = 60_000;
@@ -17,42 +20,7 @@ const LOG_LIMIT_BYTES = 10_000_000;
 // A database a test worker, with pools of their own; and nothing here outlives the run.
 const FOR_TESTS = { max_connections: 200, fsync: "off", synchronous_commit: "off", full_page_writes: "off" };
 
-export const SUPERUSER = "postgres";
-
 const exists = (path) => stat(path).then(Boolean, () => false);
-
-/** Words of a shell that PostgreSQL reads must not leak into the demo: only these reach its programs. */
-export const postgresEnvironment = () => ({ PATH: process.env.PATH, LC_ALL: "C.UTF-8", TZ: "UTC" });
-
-/** Ends a server that an earlier launcher left behind on this folder, and its pid file. */
-async function endOrphanedServer(folder) {
-  const orphans = processesWhere((pid) => {
-    const [program = "", ...args] = commandLine(pid);
-    return basename(program) === "postgres" && args.includes(folder);
-  });
-  // INT is PostgreSQL's fast shutdown: sessions end, nothing is lost.
-  await endProcesses(orphans, "SIGINT", 20_000);
-  // The number in a pid file left behind may by now be another program's, and PostgreSQL would refuse to start.
-  await rm(join(folder, "postmaster.pid"), { force: true });
-}
-
-async function initialise({ folder, programs, password }) {
-  const draft = `${folder}.new`;
-  await rm(draft, { recursive: true, force: true });
-  await mkdir(join(draft, "data"), { recursive: true, mode: 0o700 });
-  await writeFile(join(draft, "password"), password, { mode: 0o600 });
-  const [command, ...args] = [...(await unprivileged(draft)), join(programs, "initdb")];
-  const settings = ["--auth=scram-sha-256", "--encoding=UTF8", "--locale=C.UTF-8", `--username=${SUPERUSER}`];
-  const { code, stdout, stderr } = await capture(
-    command,
-    [...args, "-D", join(draft, "data"), ...settings, `--pwfile=${join(draft, "password")}`],
-    { cwd: "/", env: postgresEnvironment() },
-  );
-  if (code !== 0) throw new Refusal(`PostgreSQL could not make its cluster in ${folder}:\n${stdout}${stderr}`);
-  // Renamed when complete, so that an interrupted first start leaves no half cluster.
-  await rename(join(draft, "data"), folder);
-  await rm(draft, { recursive: true, force: true });
-}
 
 async function openLog(path) {
   const size = await stat(path).then(
@@ -95,16 +63,6 @@ async function untilReady(server, folder) {
   return false;
 }
 
-async function choosePort(wanted, rememberedIn) {
-  if (wanted) {
-    if (await isFree(wanted)) return wanted;
-    throw new Refusal(`Port ${wanted} (NEAPTIDE_PG_PORT) is taken. Choose another, or unset it to take a free one.`);
-  }
-  const remembered = Number(await readFile(rememberedIn, "utf8").catch(() => ""));
-  if (remembered && (await isFree(remembered))) return remembered;
-  return freePort();
-}
-
 async function startOnSomePort(cluster, wanted, rememberedIn) {
   // A free port can be taken by another checkout in the moment before PostgreSQL listens on it.
   for (let attempt = 1; attempt <= 3; attempt += 1) {
@@ -134,7 +92,7 @@ export async function startCluster({ data, pgPort, durable = true }) {
   if (!durable) await rm(folder, { recursive: true, force: true });
   const programs = await postgresPrograms(folder);
   const password = await secret(data, "postgres-superuser");
-  if (!(await exists(folder))) await initialise({ folder, programs, password });
+  if (!(await exists(folder))) await makeCluster({ folder, programs, password });
   const cluster = { folder, programs, durable, log: join(data, "postgres.log") };
   const { server, port } = await startOnSomePort(cluster, pgPort, join(data, "pg-port"));
   return { port, programs, password, server };

@@ -1,5 +1,6 @@
 import { join } from "node:path";
-import { postgresEnvironment, SUPERUSER } from "./cluster.mjs";
+import { SUPERUSER } from "./make-cluster.mjs";
+import { postgresEnvironment } from "./postgres-environment.mjs";
 import { capture } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
 

@@ -1,4 +1,4 @@
-import { readFileSync, readdirSync } from "node:fs";
+import { readFileSync, readdirSync, readlinkSync } from "node:fs";
 import { setTimeout as sleep } from "node:timers/promises";
 
 function read(pid, name) {
@@ -12,6 +12,15 @@ function read(pid, name) {
 
 /** Arguments a process was started with; empty when it is gone or not ours to read. */
 export const commandLine = (pid) => read(pid, "cmdline").split("\0").filter(Boolean);
+
+/** The folder a process works in; empty when it is gone or not ours to read. */
+export function workingFolder(pid) {
+  try {
+    return readlinkSync(`/proc/${pid}/cwd`);
+  } catch {
+    return "";
+  }
+}
 
 /** Whether the process was started with `name=value` in its environment. */
 export const hasVariable = (pid, name, value) => read(pid, "environ").split("\0").includes(`${name}=${value}`);
