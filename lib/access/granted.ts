@@ -3,7 +3,7 @@ import type { Member } from "./can";
 import type { Right, RightScope, ScopeOf } from "./rights";
 
 /** The newest policy of a unit, as far as rights and times need it. */
-export interface UnitPolicyInForce {
+interface UnitPolicyInForce {
   timeZone: string;
   gasUnit: "mmHg" | "kPa";
   barometricPressureMmHg: number;
@@ -29,7 +29,7 @@ export interface PatientRow extends UnitRow {
   bed: { id: string; label: string } | null;
 }
 
-export interface SelfRow {
+interface SelfRow {
   actor: Actor;
 }
 
@@ -50,7 +50,7 @@ export type RowOf<Scope extends RightScope> = RowOfScope[Scope];
 declare const held: unique symbol;
 
 /** A row that this person was granted under this right. Only `grant` makes one: a row found is not a row granted. */
-export type Granted<Row, Held extends Right> = Row & { readonly [held]: Held };
+type Granted<Row, Held extends Right> = Row & { readonly [held]: Held };
 
 export type GrantOf<Held extends Right> = Granted<RowOf<ScopeOf<Held>>, Held>;
 

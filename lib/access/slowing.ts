@@ -11,7 +11,7 @@ const LONGEST_WAIT_S = 30;
 const HOUR_S = 60 * 60;
 
 /** 1, 2, 4 … 30 s: what follows the n-th failure beyond the free ones, n from 1. */
-export function waitSeconds(beyondFree: number): number {
+function waitSeconds(beyondFree: number): number {
   return Math.min(LONGEST_WAIT_S, 2 ** (beyondFree - 1));
 }
 

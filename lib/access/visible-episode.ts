@@ -5,7 +5,7 @@ import type { Actor } from "./context";
 const DAY_MS = 24 * 60 * 60_000;
 
 /** An ended episode stays with the unit where it ran for this long; then with its lead. */
-export const ENDED_SEEN_MS = 7 * DAY_MS;
+const ENDED_SEEN_MS = 7 * DAY_MS;
 
 export type VisibleEpisode = VentilationEpisode & {
   pauses: EpisodePause[];

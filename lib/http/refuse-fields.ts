@@ -1,11 +1,10 @@
 import { refusedFields } from "@/lib/access/fields";
-import { rights, type Right } from "@/lib/access/rights";
+import { rights, type Right, type RightScope } from "@/lib/access/rights";
 import type { RowOf } from "@/lib/access/granted";
-import type { RightScope } from "@/lib/access/rights";
 import { AppError } from "@/lib/contracts";
 
 /** 403 naming every field that this person's role may not send. */
-export function forbiddenFields(names: readonly string[]): AppError {
+function forbiddenFields(names: readonly string[]): AppError {
   return new AppError("forbidden", `Your role may not chart this here: ${names.join(", ")}.`, {
     errors: names.map((path) => ({ path, message: "Your role may not chart this here." })),
   });

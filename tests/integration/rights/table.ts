@@ -1,7 +1,7 @@
 import type { Asker, Ward } from "../http/ward";
 
 /** One answer's status for each person, in one of their own unit's rows. */
-export type Statuses = Record<Asker, number>;
+type Statuses = Record<Asker, number>;
 
 export interface Named {
   patientId: string;
