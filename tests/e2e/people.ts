@@ -19,7 +19,7 @@ export const test = base.extend<{ page: Page }>({
     page.on("console", (message) => {
       if (message.type() !== "error" && message.type() !== "warning") return;
       // The browser itself reports every refused request; the tests of refusals look at their words instead.
-      if (/the server responded with a status of (401|403|404|409|422)|ERR_INTERNET_DISCONNECTED/.test(message.text()))
+      if (/the server responded with a status of (401|403|404|409|422|429)|ERR_INTERNET_DISCONNECTED/.test(message.text()))
         return;
       unexpected.push(message.text());
     });
