@@ -20,10 +20,10 @@ export function evaluate(input: EvaluateInput): Evaluation {
   const metrics = judgeAll(scene);
   const checks = groupChecks(scene, metrics);
   const group = groupOf(scene, checks);
-  const findings = findingsOf(scene, metrics);
-  const due = dueListOf(scene, metrics);
   const derived = {} as Record<DerivedName, Derived>;
   for (const name of derivedNames) derived[name] = present(scene, metrics[name]);
+  const findings = findingsOf(scene, metrics, derived);
+  const due = dueListOf(scene, metrics);
   return {
     derived,
     findings,

@@ -4,9 +4,10 @@ import { countUntil } from "./timeline/item";
 
 /** The next moment at which time alone changes a state or word: a fact charted ahead counts when its time comes. */
 export function validUntilOf(scene: Scene): string | null {
-  const { moments } = scene.line;
-  const next = moments[countUntil(moments, scene.at)]?.t;
-  const ahead = [...scene.moments, ...scene.clock.edges, ...(next === undefined ? [] : [next])];
-  const later = ahead.filter((moment) => moment > scene.at);
-  return later.length === 0 ? null : isoOf(Math.min(...later));
+  const { moments, clock, line, at } = scene;
+  let next = Infinity;
+  for (const moment of moments) if (moment > at && moment < next) next = moment;
+  for (const edge of clock.edges) if (edge > at && edge < next) next = edge;
+  for (const facts of line.all) next = Math.min(next, facts[countUntil(facts, at)]?.t ?? Infinity);
+  return next === Infinity ? null : isoOf(next);
 }

@@ -1,7 +1,6 @@
 import { isoOf } from "../instant";
 import { isHeldOutside, type Judged } from "../judge/judged";
-import { present } from "../judge/present";
-import type { DerivedName, Finding } from "../result";
+import type { Derived, DerivedName, Finding } from "../result";
 import type { Scene } from "../scene";
 import { answerTo, type Answer } from "./acknowledgement";
 import type { JudgedMetrics } from "./checks";
@@ -26,11 +25,11 @@ function presentAnswer(answer: Answer | null): Finding["acknowledgement"] {
   return answer && { by: answer.fact.author, until: isoOf(answer.until)!, note: answer.fact.note };
 }
 
-function findingOf(scene: Scene, metrics: JudgedMetrics, judged: Judged): Finding {
+function findingOf(scene: Scene, metrics: JudgedMetrics, judged: Judged, shown: Derived): Finding {
   const outside = judged.state === "outside" || isHeldOutside(judged);
   const answer = outside && !scene.comfort ? answerTo(scene, metrics, judged) : null;
   const clock = outside && !answer && escalates(scene, metrics, judged) ? escalationClock(scene, judged, null) : null;
-  const { value, lastState, lastValue, limit, since } = present(scene, judged);
+  const { value, lastState, lastValue, limit, since } = shown;
   return {
     metric: judged.name,
     state: judged.state ?? "unmeasured",
@@ -47,9 +46,12 @@ function findingOf(scene: Scene, metrics: JudgedMetrics, judged: Judged): Findin
 }
 
 /** A1–A3: one finding for each metric that the order limits. */
-export function findingsOf(scene: Scene, metrics: JudgedMetrics): Finding[] {
+export function findingsOf(
+  scene: Scene,
+  metrics: JudgedMetrics,
+  derived: Readonly<Record<DerivedName, Derived>>,
+): Finding[] {
   return checked
-    .map((name) => metrics[name])
-    .filter(({ limit }) => limit !== null)
-    .map((judged) => findingOf(scene, metrics, judged));
+    .filter((name) => metrics[name].limit !== null)
+    .map((name) => findingOf(scene, metrics, metrics[name], derived[name]));
 }

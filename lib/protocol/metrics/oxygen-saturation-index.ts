@@ -7,7 +7,7 @@ import type { Reading } from "../judge/reading";
 import { isNonInvasive } from "../modes-asked";
 import { settingsAt, type Scene } from "../scene";
 import { countUntil } from "../timeline/item";
-import { meanPressureAt } from "./mean-pressure-at";
+import { hasMeanPressure, meanPressureAt } from "./mean-pressure-at";
 import { settingInput } from "./setting-input";
 
 const named = { name: "oxygenSaturationIndex", unit: "", source: "DesPrez, Chest 2017;152:1151" } as const;
@@ -32,7 +32,7 @@ export function judgeOxygenSaturationIndex(scene: Scene): Judged {
   const judged = judgeSeries(scene, {
     named,
     limit: null,
-    count: countUntil(scene.line.spo2, scene.at),
+    count: hasMeanPressure(scene) ? countUntil(scene.line.spo2, scene.at) : 0,
     read: (index) => read(scene, index),
     ageing: spo2Ageing(scene),
     dueAt: () => dueAt,

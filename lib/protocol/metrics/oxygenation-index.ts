@@ -9,7 +9,7 @@ import { isNonInvasive } from "../modes-asked";
 import type { Scene } from "../scene";
 import { countUntil, type Item } from "../timeline/item";
 import { atGas } from "./gas-fio2";
-import { meanPressureAt } from "./mean-pressure-at";
+import { hasMeanPressure, meanPressureAt } from "./mean-pressure-at";
 
 const named = { name: "oxygenationIndex", unit: "", source: "DesPrez, Chest 2017;152:1151" } as const;
 
@@ -35,7 +35,7 @@ export function judgeOxygenationIndex(scene: Scene): Judged {
   const judged = judgeSeries(scene, {
     named,
     limit: null,
-    count: countUntil(pao2, scene.at),
+    count: hasMeanPressure(scene) ? countUntil(pao2, scene.at) : 0,
     read: (index) => read(scene, pao2[index]!),
     ageing,
     dueAt: ({ t }) => gasDueAt(scene, ageing, t, false),

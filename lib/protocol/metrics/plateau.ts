@@ -11,7 +11,7 @@ import type { Hold } from "../timeline/holds";
 import { countUntil } from "../timeline/item";
 import { settingInput } from "./setting-input";
 
-export const plateau = {
+const plateau = {
   name: "plateauCmH2O",
   unit: "cmH2O",
   source: "ARDS Network, N Engl J Med 2000;342:1301; end-inspiratory hold",

@@ -45,12 +45,13 @@ function read(scene: Scene, item: Item<MechanicsFact>): Reading {
 
 /** V10: only in an unsupported spontaneous breathing trial. */
 export function judgeRapidShallowBreathingIndex(scene: Scene): Judged {
-  const { breathVolumes } = scene.line;
+  const { breathVolumes, therapies } = scene.line;
+  const everTried = therapies.some(({ t, fact }) => t <= scene.at && fact.unsupported === true);
   const { exhaledVolumeMin } = scene.policy.intervals;
   const judged = judgeSeries(scene, {
     named,
     limit: null,
-    count: countUntil(breathVolumes, scene.at),
+    count: everTried ? countUntil(breathVolumes, scene.at) : 0,
     read: (index) => read(scene, breathVolumes[index]!),
     ageing: { row: "breaths", intervalMin: exhaledVolumeMin },
     dueAt: ({ t }) => afterInterval(scene, t, exhaledVolumeMin),

@@ -32,7 +32,7 @@ function read(scene: Scene, item: Item<MechanicsFact>): Reading {
 }
 
 /** S8: under *obstructive* or *copd* trapped gas has a limit of its own. */
-export function trappedGasLimit(scene: Scene): Judged["limit"] {
+function trappedGasLimit(scene: Scene): Judged["limit"] {
   return hasCondition(scene.targets, "obstructive", "copd") ? { max: trappedGasMaxCmH2O } : null;
 }
 

@@ -40,7 +40,7 @@ const carbonDioxide =
 const oxygen = k.fio2 | k.peep | k.inspiratoryTime | k.mode | k.position | k.recruitment | k.tube | k.ecmo | k.ecmoFlow;
 
 /** F6: which changes expire which results; F3: which make a gas due. */
-export const expiryRows = {
+const expiryRows = {
   /** Plateau, ΔP, static compliance, total and trapped PEEP. */
   pressures,
   /** Power: any rate too. */

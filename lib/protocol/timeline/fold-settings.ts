@@ -23,10 +23,13 @@ export interface Snapshot {
 
 const fieldsByMode = new Map<VentilationMode, readonly SettingField[]>();
 
-function fieldsOf(mode: VentilationMode): readonly SettingField[] {
-  const known = fieldsByMode.get(mode) ?? [...fieldsOfMode(mode)];
-  fieldsByMode.set(mode, known);
-  return known;
+/** The mode's fields as a list that is made once. */
+export function fieldsOf(mode: VentilationMode): readonly SettingField[] {
+  const known = fieldsByMode.get(mode);
+  if (known) return known;
+  const fields = [...fieldsOfMode(mode)];
+  fieldsByMode.set(mode, fields);
+  return fields;
 }
 
 function hold(values: Snapshot["values"], mode: VentilationMode, item: Item<SettingsFact>): Snapshot["values"] {

@@ -24,12 +24,14 @@ function zeroFlowPlateau(fact: MechanicsFact, snapshot: Snapshot | null): number
 function holdOf(item: Item<MechanicsFact>, snapshots: readonly Snapshot[]): Hold | null {
   const { fact, t } = item;
   const snapshot = newestUntil(snapshots, t);
-  const base = { t, item, snapshot, zeroFlow: false };
-  if (fact.hold === "not-possible") return { ...base, plateauCmH2O: null, quality: "not-possible" };
+  if (fact.hold === "not-possible") {
+    return { t, item, plateauCmH2O: null, quality: "not-possible", zeroFlow: false, snapshot };
+  }
   const plateauCmH2O = fact.plateauCmH2O ?? null;
-  if (plateauCmH2O !== null) return { ...base, plateauCmH2O, quality: fact.hold ?? "unsaid" };
+  if (plateauCmH2O !== null)
+    return { t, item, plateauCmH2O, quality: fact.hold ?? "unsaid", zeroFlow: false, snapshot };
   const zeroFlow = zeroFlowPlateau(fact, snapshot);
-  return zeroFlow === null ? null : { ...base, plateauCmH2O: zeroFlow, quality: "relaxed", zeroFlow: true };
+  return zeroFlow === null ? null : { t, item, plateauCmH2O: zeroFlow, quality: "relaxed", zeroFlow: true, snapshot };
 }
 
 function pHighOf(snapshot: Snapshot): Hold | null {

@@ -1,7 +1,7 @@
 import type { SettingField } from "../../physiology/modes";
 import { compareToLimit } from "../compare-to-limit";
 import { changeKind as k, type Change } from "./change-kinds";
-import type { Held, Snapshot } from "./fold-settings";
+import { fieldsOf, type Held, type Snapshot } from "./fold-settings";
 
 /** F3: a set rate or volume lowered by this share or more makes a gas due. Starting value, from memory. */
 const cutShare = 0.2;
@@ -65,10 +65,10 @@ function kindsOfValue(field: SettingField, before: Held | undefined, after: Held
 function kindsBetween(before: Snapshot, after: Snapshot): number {
   const modeChanged = before.mode !== after.mode;
   let kinds = modeChanged ? k.mode : 0;
-  for (const [name, held] of Object.entries(after.values)) {
-    const field = name as SettingField;
+  for (const field of fieldsOf(after.mode)) {
+    const held = after.values[field];
     const earlier = before.values[field];
-    if (held.item !== after.item || (modeChanged && !earlier)) continue;
+    if (!held || held.item !== after.item || (modeChanged && !earlier)) continue;
     kinds |= kindsOfValue(field, earlier, held, after);
   }
   return kinds;

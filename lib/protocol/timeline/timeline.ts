@@ -60,8 +60,8 @@ export interface Timeline {
   pao2: Gas[];
   paco2: Gas[];
   ph: Gas[];
-  /** Every `chartedAt`, ascending: what is charted ahead of `at` changes the answer when its moment comes. */
-  moments: { t: number }[];
+  /** Every kind's facts: what is charted ahead of `at` changes the answer when its moment comes. */
+  all: (readonly { t: number }[])[];
 }
 
 function holding<Fact, Field extends keyof Fact>(items: readonly { t: number; fact: Fact }[], field: Field) {
@@ -113,7 +113,6 @@ function build(facts: Facts): Timeline {
     ...positionChanges(charted.positions),
     ...therapyChanges(charted.therapies),
   ].sort((a, b) => a.t - b.t);
-  const moments: { t: number }[] = [...Object.values(charted), mechanics, observations, measured.gases].flat();
   const isProduct = ({ t, fact }: Mechanics) =>
     typeof fact.exhaledTidalVolumeMl === "number" &&
     typeof fact.respiratoryRateTotal === "number" &&
@@ -135,7 +134,7 @@ function build(facts: Facts): Timeline {
     plateaus: holds.filter(isPlateau),
     powerReadings: powerReadingsOf(holds, measured.exhaled, snapshots),
     volumePoints: volumePointsOf(snapshots, mechanics),
-    moments: moments.sort((a, b) => a.t - b.t),
+    all: [...Object.values(charted), mechanics, observations, measured.gases],
   };
 }
 

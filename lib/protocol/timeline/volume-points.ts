@@ -23,7 +23,7 @@ export function differsFromSet(exhaledMl: number, setMl: number): boolean {
 }
 
 /** Of set and measured the volume to judge; null where neither says. */
-export function volumeJudged(
+function volumeJudged(
   plan: VolumePlan,
   setMl: number | null,
   fact: MechanicsFact,

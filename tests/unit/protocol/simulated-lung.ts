@@ -18,7 +18,7 @@ export interface Setting {
   flowLPerMin: number;
 }
 
-export const plateauOf = (lung: Lung, { tidalVolumeMl, peepCmH2O }: Setting) =>
+const plateauOf = (lung: Lung, { tidalVolumeMl, peepCmH2O }: Setting) =>
   peepCmH2O + tidalVolumeMl / lung.complianceMlPerCmH2O;
 
 const rounded = (value: number) => Math.round(value * 10) / 10;
@@ -32,7 +32,7 @@ export interface Doing {
   exhaled?: boolean;
 }
 
-export const begins: Setting = { tidalVolumeMl: 480, peepCmH2O: 8, respiratoryRate: 20, fio2: 0.6, flowLPerMin: 60 };
+const begins: Setting = { tidalVolumeMl: 480, peepCmH2O: 8, respiratoryRate: 20, fio2: 0.6, flowLPerMin: 60 };
 
 function reading(lung: Lung, setting: Setting, { at, hold, exhaled }: Doing) {
   if (!hold && !exhaled) return [];
