@@ -26,6 +26,7 @@ export const noteCodes = {
   "set-times-set": "V7: minute volume from set volume × set rate",
   "set-volume-alone": "V6: judged on the set volume; no fresh measured volume beside it",
   "spo2-above-97": "S/F is not usable for severity above SpO2 97 %",
+  spontaneous: "V6: the spontaneous volume of SIMV, beside the mandatory one",
   "spontaneous-not-measured": "V6: SIMV judged on mandatory breaths alone",
   "too-soon": "F5: read too soon after a change",
   "zero-flow": "V9: pressure control ending at zero flow; plateau = set PEEP + pressure above PEEP",

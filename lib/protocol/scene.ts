@@ -31,6 +31,8 @@ export interface Scene {
   mode: VentilationMode | null;
   pbw: Pbw;
   onEcmo: boolean;
+  /** The episode has ended: nothing is due. */
+  ended: boolean;
   /** O3: comfort: nothing judged, nothing due. */
   comfort: boolean;
   /** V9: a plateau is asked now. */
@@ -65,6 +67,7 @@ export function sceneOf(input: EvaluateInput): Scene {
   const targets = input.targets ?? targetsFromSet("unit-default");
   const clock = activeClockOf(input.episode);
   const intubatedAt = input.episode?.intubatedAt;
+  const endedAt = input.episode?.endedAt;
   return {
     at,
     targets,
@@ -76,6 +79,7 @@ export function sceneOf(input: EvaluateInput): Scene {
     mode: settings?.mode ?? null,
     pbw: pbwOf(facts, at),
     onEcmo: ecmoAt(line, at),
+    ended: endedAt !== undefined && endedAt !== null && millisecondsOf(endedAt) <= at,
     comfort: hasCondition(targets, "comfort"),
     asksPlateau: plateauAsked(line, settings, at),
     moments: [],

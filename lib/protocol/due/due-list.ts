@@ -23,7 +23,7 @@ function gasDue(scene: Scene, { ph, paco2MmHg, pao2MmHg }: JudgedMetrics): numbe
 
 /** F2, F3: what is due or will be, earliest first. SpO2 is named only when overdue; away and comfort nothing is due. */
 export function dueListOf(scene: Scene, metrics: JudgedMetrics): Due[] {
-  if (scene.comfort || scene.clock.isAway(scene.at)) return [];
+  if (scene.comfort || scene.ended || scene.clock.isAway(scene.at)) return [];
   const moments: [Due["what"], number | null][] = [
     ["height", heightDueAt(scene)],
     ["hold", holdDueAt(scene)],

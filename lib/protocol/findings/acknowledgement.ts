@@ -1,4 +1,5 @@
 import { compareToLimit } from "../compare-to-limit";
+import { earliest } from "../due/earliest";
 import type { AcknowledgementFact } from "../facts";
 import { foresee } from "../freshness";
 import { hourMs, millisecondsOf } from "../instant";
@@ -40,27 +41,28 @@ function quietUntil(judged: Judged, { t, fact }: Item<AcknowledgementFact>): num
   return Math.min(millisecondsOf(fact.until), t + hours * hourMs);
 }
 
-/** A2: one step further out than what was answered. */
-function wentFurther(judged: Judged, { t, fact }: Item<AcknowledgementFact>): boolean {
+/** A2: when it went one step further out than what was answered. */
+function wentFurtherAt(judged: Judged, { t, fact }: Item<AcknowledgementFact>): number | null {
   const { limit } = judged;
-  if (!limit || fact.value === null) return false;
+  if (!limit || fact.value === null) return null;
   const answered = sideOf(fact.value, limit) === null ? 0 : (distanceTo(fact.value, limit) ?? 0);
   const step = stepOf(judged.name, judged.unit);
-  return judged
-    .excursionsAfter(t)
-    .some(
-      (excursion) => isTimely(excursion) && compareToLimit(distanceTo(excursion.value, limit)! - answered, step) >= 0,
-    );
+  const further = (excursion: Excursion) => compareToLimit(distanceTo(excursion.value, limit)! - answered, step) >= 0;
+  return judged.excursionsAfter(t).find((excursion) => isTimely(excursion) && further(excursion))?.recordedAt ?? null;
 }
 
-/** A2: a second metric went outside after the answer. */
-function anotherWentOut(metrics: JudgedMetrics, judged: Judged, t: number): boolean {
+/** A2: when a second metric went outside after the answer. */
+function anotherWentOutAt(metrics: JudgedMetrics, judged: Judged, t: number): number | null {
   const own = checkOfMetric[judged.name];
-  return Object.values(metrics).some((other) => {
+  const others = Object.values(metrics).filter((other) => {
     const check = checkOfMetric[other.name];
-    if (!check || check === own || !other.limit || other.state === "not-asked") return false;
-    return other.excursionsAfter(t).some((excursion) => excursion.starts && isTimely(excursion));
+    return check !== undefined && check !== own && other.limit !== null && other.state !== "not-asked";
   });
+  const went = others.map(
+    (other) =>
+      other.excursionsAfter(t).find((excursion) => excursion.starts && isTimely(excursion))?.recordedAt ?? null,
+  );
+  return earliest(...went);
 }
 
 function newestFor(scene: Scene, metric: DerivedName): Item<AcknowledgementFact> | null {
@@ -71,21 +73,26 @@ function newestFor(scene: Scene, metric: DerivedName): Item<AcknowledgementFact>
   return null;
 }
 
-/** What answers a finding: the fact and until when it keeps quiet. */
+/** What answers a finding now; `endedAt`: when the newest answer stopped keeping it quiet. */
 export interface Answer {
-  fact: AcknowledgementFact;
-  until: number;
+  fact: AcknowledgementFact | null;
+  until: number | null;
+  endedAt: number | null;
 }
+
+const unanswered: Answer = { fact: null, until: null, endedAt: null };
 
 /**
  * A2: the acknowledgement in force for a metric. It ends with its time, when the metric goes one step further out, and
  * when a second metric goes outside.
  */
-export function answerTo(scene: Scene, metrics: JudgedMetrics, judged: Judged): Answer | null {
+export function answerTo(scene: Scene, metrics: JudgedMetrics, judged: Judged): Answer {
   const newest = newestFor(scene, judged.name);
-  if (!newest) return null;
+  if (!newest) return unanswered;
   const until = quietUntil(judged, newest);
-  if (scene.at >= until || wentFurther(judged, newest) || anotherWentOut(metrics, judged, newest.t)) return null;
+  const returned = earliest(wentFurtherAt(judged, newest), anotherWentOutAt(metrics, judged, newest.t));
+  if (returned !== null) return { ...unanswered, endedAt: Math.min(returned, until) };
+  if (scene.at >= until) return { ...unanswered, endedAt: until };
   foresee(scene, until);
-  return { fact: newest.fact, until };
+  return { fact: newest.fact, until, endedAt: null };
 }

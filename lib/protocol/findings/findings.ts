@@ -21,14 +21,20 @@ const checked: readonly DerivedName[] = [
   "mechanicalPowerJPerMin",
 ];
 
-function presentAnswer(answer: Answer | null): Finding["acknowledgement"] {
-  return answer && { by: answer.fact.author, until: isoOf(answer.until)!, note: answer.fact.note };
+/** A3: a paused patient's findings are not sent. */
+function escalationOf(scene: Scene, metrics: JudgedMetrics, judged: Judged, answer: Answer): Finding["escalation"] {
+  if (answer.fact || scene.clock.isAway(scene.at) || !escalates(scene, metrics, judged)) return null;
+  const clock = escalationClock(scene, judged, answer.endedAt);
+  return clock && { from: isoOf(clock.from)!, at: isoOf(clock.at) };
+}
+
+function presentAnswer({ fact, until }: Answer): Finding["acknowledgement"] {
+  return fact && { by: fact.author, until: isoOf(until)!, note: fact.note };
 }
 
 function findingOf(scene: Scene, metrics: JudgedMetrics, judged: Judged, shown: Derived): Finding {
-  const outside = judged.state === "outside" || isHeldOutside(judged);
-  const answer = outside && !scene.comfort ? answerTo(scene, metrics, judged) : null;
-  const clock = outside && !answer && escalates(scene, metrics, judged) ? escalationClock(scene, judged, null) : null;
+  const outside = (judged.state === "outside" || isHeldOutside(judged)) && !scene.comfort;
+  const answer = outside ? answerTo(scene, metrics, judged) : null;
   const { value, lastState, lastValue, limit, since } = shown;
   return {
     metric: judged.name,
@@ -40,8 +46,8 @@ function findingOf(scene: Scene, metrics: JudgedMetrics, judged: Judged, shown: 
     distance: distanceOf(judged),
     freshness: judged.freshness,
     since,
-    acknowledgement: presentAnswer(answer),
-    escalation: clock && { from: isoOf(clock.from)!, at: isoOf(clock.at) },
+    acknowledgement: answer && presentAnswer(answer),
+    escalation: answer && escalationOf(scene, metrics, judged, answer),
   };
 }
 

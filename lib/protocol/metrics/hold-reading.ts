@@ -17,9 +17,11 @@ export interface PairedHold {
   inputs: Input[];
 }
 
-function plateauInputs(hold: Hold): Input[] {
+/** V9: at zero flow the plateau is set PEEP + pressure above PEEP; set PEEP is named once. */
+function plateauInputs(hold: Hold, isSetPeep: boolean): Input[] {
   if (!hold.zeroFlow) return [{ name: "plateauCmH2O", value: hold.plateauCmH2O, unit: "cmH2O", item: hold.item }];
-  return settingInput(hold.snapshot, "pressureAbovePeepCmH2O", "cmH2O");
+  const above = settingInput(hold.snapshot, "pressureAbovePeepCmH2O", "cmH2O");
+  return isSetPeep ? above : [...above, ...settingInput(hold.snapshot, "peepCmH2O", "cmH2O")];
 }
 
 /**
@@ -39,7 +41,8 @@ export function readHold(
   const peep = totalPeepOf(scene, mechanics);
   const notes: NoteCode[] = [...(hold.zeroFlow ? (["zero-flow"] as const) : []), ...peep.notes];
   if (peep.value === null) return { ...base, notes };
-  const inputs = [...plateauInputs(hold), ...peep.inputs];
+  const isSetPeep = peep.inputs.some(({ name }) => name === "peepCmH2O");
+  const inputs = [...plateauInputs(hold, isSetPeep), ...peep.inputs];
   const paired = { plateauCmH2O: hold.plateauCmH2O, totalPeepCmH2O: peep.value, item: mechanics, notes, inputs };
   const computed = compute(paired);
   const why: NoteCode[] = computed.value === null ? ["not-computable"] : [];

@@ -70,7 +70,7 @@ function chooseBySet(scene: Scene, plan: VolumePlan, set: Held): Choice {
   const larger = volumeMl > setMl;
   const beside = larger
     ? [{ volumeMl: setMl, item: set.item, note: "set" as const }]
-    : [{ volumeMl, item, note: "exhaled" as const }];
+    : [{ volumeMl, item, note: plan.beside! }];
   if (!larger) return { ...alone, notes, beside };
   return { volumeMl, isSet: false, t: item.t, item, freshness, dueAt, notes, beside };
 }

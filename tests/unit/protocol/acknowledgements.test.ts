@@ -180,6 +180,20 @@ describe("what is sent", () => {
     expect(escalation("plateauCmH2O", back)).toEqual({ from: moment("10:50"), at: moment("11:20") });
   });
 
+  it("A3 a finding that returns counts anew from its return", () => {
+    const acknowledgements = [answered("10:30", "plateauCmH2O", 32, "11:00")];
+    const ended = judge("11:10", { facts: { ...outsideAt32, acknowledgements } });
+    expect(escalation("plateauCmH2O", ended)).toEqual({ from: moment("11:00"), at: moment("11:30") });
+    const further = { ...relaxed("10:40", 34, { totalPeepCmH2O: 20 }), recordedAt: moment("10:42") };
+    const worse = judge("10:50", { facts: { mechanics: [...outsideAt32.mechanics, further], acknowledgements } });
+    expect(escalation("plateauCmH2O", worse)).toEqual({ from: moment("10:42"), at: moment("11:12") });
+  });
+
+  it("A3 nothing is sent of a patient who is away", () => {
+    const pauses = [{ from: moment("10:05"), until: null }];
+    expect(escalation("plateauCmH2O", judge("11:00", { facts: outsideAt32, episode: { pauses } }))).toBeNull();
+  });
+
   it("A3 an answered finding is not sent", () => {
     const acknowledgements = [answered("10:30", "plateauCmH2O", 32, "13:00")];
     expect(escalation("plateauCmH2O", judge("10:40", { facts: { ...outsideAt32, acknowledgements } }))).toBeNull();

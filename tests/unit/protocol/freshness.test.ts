@@ -227,6 +227,11 @@ describe("when SpO2, gas, check and height are due", () => {
     expect(dueAt("height", judge("08:00", { facts: { heights: short } }))).toBeNull();
   });
 
+  it("F2 nothing is due of an episode that ended", () => {
+    expect(judge("12:00", { episode: { endedAt: moment("11:00") } }).due).toEqual([]);
+    expect(judge("10:59", { episode: { endedAt: moment("11:00") } }).due).not.toEqual([]);
+  });
+
   it("F2 what is due stands with the earliest first", () => {
     const { due } = judge("09:00", { facts: { heights: [] } });
     expect(due.map(({ what, overdue }) => [what, overdue])).toEqual([

@@ -97,7 +97,16 @@ describe("plateau and how the hold went", () => {
     const derived = metric(name, "10:10", measured(zero(), pressureControl));
     expect(derived).toMatchObject({ value: 24, state: "inside", notes: ["zero-flow"], dueAt: moment("14:00") });
     expect(derived.inputs.map((input) => input.name)).toEqual(["peepCmH2O", "pressureAbovePeepCmH2O"]);
-    expect(metric("drivingPressureCmH2O", "10:10", measured(zero(), pressureControl)).value).toBe(14);
+    const driving = metric("drivingPressureCmH2O", "10:10", measured(zero(), pressureControl));
+    expect([driving.value, driving.inputs.map(({ name: input }) => input)]).toEqual([
+      14,
+      ["pressureAbovePeepCmH2O", "peepCmH2O"],
+    ]);
+    const trapped = metric("drivingPressureCmH2O", "10:10", measured(zero({ totalPeepCmH2O: 12 }), pressureControl));
+    expect([trapped.value, trapped.inputs.map(({ name: input }) => input)]).toEqual([
+      12,
+      ["pressureAbovePeepCmH2O", "peepCmH2O", "totalPeepCmH2O"],
+    ]);
     expect(metric(name, "10:10", measured(zero({ hold: "relaxed" }), pressureControl)).value).toBe(24);
     expect(metric(name, "10:10", measured(zero({ hold: "effort" }), pressureControl)).value).toBeNull();
     expect(metric(name, "10:10", measured(zero({ plateauCmH2O: 22, hold: "relaxed" }), pressureControl)).value).toBe(

@@ -61,7 +61,7 @@ function plateauByHand(at: number): Pick<Derived, "freshness" | "state" | "value
   return { freshness, state, value: plateau, lastValue: plateau };
 }
 
-describe("a simulated day", () => {
+describe("a simulated day", { timeout: 30_000 }, () => {
   it("F1 F4 F6 V8 the plateau's word and state at every 5 min are those worked out by hand", () => {
     for (const at of moments) {
       const { freshness, state, value, lastValue } = answer(at).derived.plateauCmH2O;
