@@ -57,7 +57,7 @@ export function resultWords(derived: Derived | undefined, told: Told): ResultWor
     unit,
     was,
     state: derived.state ?? "unmeasured",
-    aside: asideOf(derived, told),
+    aside: stale ? null : asideOf(derived, told),
     lastOutsideAt: stale && derived.chartedAt ? timeOfDay({ at: derived.chartedAt, timeZone: told.timeZone }) : null,
   };
 }

@@ -13,6 +13,7 @@ import { PatientHeader } from "./patient-header";
 import type { Pending } from "./pending-facts";
 import { SentFoot } from "./sent-foot";
 import { SentResults } from "./sent-results";
+import { StandsSince } from "./stands-since";
 import { useRecord } from "./use-record";
 import type { RecordScreenState } from "./use-record-screen";
 import { wasNowRows } from "./was-now-rows";
@@ -35,6 +36,7 @@ export function SentScreen({ screen, onHeight, onNext }: SentScreenProps) {
       <PatientHeader worksheet={worksheet} onHeight={onHeight} />
       <NotRefreshed failing={failing && !flow.sending} at={worksheet.at} now={now} timeZone={worksheet.unit.timeZone} />
       <SendingState screen={screen} pending={flow.pending} />
+      {!flow.sending && <StandsSince pending={flow.pending} />}
       <div className="flex-1 px-4 py-4 tablet:px-6 desk:px-8">
         <WasNowTable pending={flow.pending} before={before} />
         <SentResults />

@@ -19,6 +19,8 @@ export function useChartMutation<Sent extends { body: Keyed }>(pathOf: (sent: Se
   const client = useQueryClient();
   const mutation = useMutation<ChartAnswer, Error, Sent>({
     mutationFn: (sent) => request({ path: pathOf(sent), body: sent.body, answer: chartAnswerSchema }),
+    // A browser's word on being offline is unreliable on a ward's Wi-Fi: keep trying, and count the tries truthfully.
+    networkMode: "always",
     retry: (_failures, error) => canBeSentAgain(error),
     retryDelay: (failures) => waitBeforeTry(failures + 1),
     onSuccess: (answer) => holdWorksheet(client, answer.worksheet),

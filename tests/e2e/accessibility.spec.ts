@@ -9,14 +9,23 @@ const sizes = [
   { width: 320, height: 640 },
 ];
 
+/** What a pinned bar covers until one scrolls reads as too small a target: those are measured on a page without overlap. */
 async function expectClean(page: Page, where: string) {
-  const { violations } = await new AxeBuilder({ page })
-    .withTags(["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"])
-    .analyze();
+  const axe = new AxeBuilder({ page }).withTags(["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"]);
+  const { violations } = await axe.disableRules(["target-size"]).analyze();
   const said = violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(" ")).join(", ")}`);
   expect(said, where).toEqual([]);
   const overflow = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
   expect(overflow, `${where}: no sideways scrolling`).toBeLessThanOrEqual(0);
+}
+
+async function expectTargets(page: Page, where: string, width: number) {
+  await page.setViewportSize({ width, height: 3000 });
+  const { violations } = await new AxeBuilder({ page }).withRules(["target-size"]).analyze();
+  expect(
+    violations.flatMap(({ nodes }) => nodes.map(({ target }) => target.join(" "))),
+    where,
+  ).toEqual([]);
 }
 
 for (const theme of ["day", "night"]) {
@@ -38,6 +47,7 @@ for (const theme of ["day", "night"]) {
       for (const size of sizes) {
         await page.setViewportSize(size);
         await expectClean(page, `${path} ${theme} ${size.width}`);
+        await expectTargets(page, `targets of ${path} at ${size.width}`, size.width);
       }
     }
   });

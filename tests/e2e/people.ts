@@ -19,7 +19,9 @@ export const test = base.extend<{ page: Page }>({
     page.on("console", (message) => {
       if (message.type() !== "error" && message.type() !== "warning") return;
       // The browser itself reports every refused request; the tests of refusals look at their words instead.
-      if (/the server responded with a status of (401|403|404|409|422|429)|ERR_INTERNET_DISCONNECTED/.test(message.text()))
+      if (
+        /the server responded with a status of (401|403|404|409|422|429)|ERR_INTERNET_DISCONNECTED/.test(message.text())
+      )
         return;
       unexpected.push(message.text());
     });
@@ -55,4 +57,11 @@ export async function patientIn(page: Page, bed: string): Promise<string> {
 export async function post(page: Page, path: string, data: unknown) {
   const base = process.env.BASE_URL ?? "";
   return page.request.post(path, { data, headers: { origin: new URL(base).origin } });
+}
+
+/** Opens a patient's record form and waits until it answers: a touch before that would be the browser's alone. */
+export async function openRecord(page: Page, patient: string, focus = ""): Promise<void> {
+  await page.goto(`/patients/${patient}/record${focus && `?focus=${focus}`}`);
+  await expect(page.locator("[data-record-foot]")).toBeVisible();
+  await page.waitForLoadState("networkidle");
 }
