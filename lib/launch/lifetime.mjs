@@ -1,5 +1,6 @@
 import { startNothingMore, stopWork, within } from "./processes.mjs";
 import { Refusal } from "./refusal.mjs";
+import { requireSystem } from "./requirements.mjs";
 
 // What was stopped under it makes the command fail at once; the time is for its own tidying up.
 const TIDY_MS = 1_000;
@@ -45,11 +46,22 @@ function listenForSignals(exitCodeOf) {
   }
 }
 
+function listenForFaults() {
+  // A closed terminal or a pipe whose reader has gone: nobody reads on, and what runs must still be stopped.
+  for (const stream of [process.stdout, process.stderr]) stream.on("error", () => void end(1));
+  process.on("uncaughtException", (error) => {
+    console.error(error);
+    void end(1);
+  });
+}
+
 /** Runs a command of the launcher: signals, refusals and faults all end with nothing left running. */
 export async function launch(main) {
   let served = false;
   listenForSignals((signal) => (served ? 0 : exitCodes[signal]));
+  listenForFaults();
   try {
+    requireSystem();
     command = main({ serving: () => (served = true) });
     await end(await command);
   } catch (error) {

@@ -1,4 +1,5 @@
 import { describe, expect, it } from "vitest";
+import { requireSystem } from "@/lib/launch/requirements.mjs";
 import { modeFrom, portFrom, readSettings, root } from "@/lib/launch/settings.mjs";
 
 describe("what the environment asks of the launcher", () => {
@@ -27,5 +28,14 @@ describe("what the environment asks of the launcher", () => {
 
   it("a mode that does not exist is refused, so that a typing error never starts the demo", () => {
     expect(() => modeFrom({ NEAPTIDE_MODE: "prodution" })).toThrow(/'prodution'/);
+  });
+});
+
+describe("the system", () => {
+  it("Node 20.9 on Linux is enough; older Node and other systems are refused in a sentence", () => {
+    expect(() => requireSystem("20.9.0", "linux")).not.toThrow();
+    expect(() => requireSystem("20.8.1", "linux")).toThrow("Node 20.9 or newer is needed; this is 20.8.1.");
+    expect(() => requireSystem("18.20.0", "linux")).toThrow("Node 20.9");
+    expect(() => requireSystem("22.1.0", "darwin")).toThrow("darwin");
   });
 });
