@@ -1,6 +1,6 @@
 "use client";
 
-import { useEffect } from "react";
+import { useEffect, useRef } from "react";
 import { Keypad, type KeypadProps } from "@/components/ui/keypad";
 import { holdQualities } from "@/lib/contracts";
 import type { NumericSettingField } from "@/lib/physiology";
@@ -31,7 +31,13 @@ export function EntryKeypad() {
   if (!target) return null;
   const isPlateau = target.field === "plateauCmH2O";
   return (
-    <div className={styles.keypad} data-over={target.part === "settings" ? "measured" : "settings"} data-keypad-zone>
+    // The field keeps the focus, and its cursor, while its digits are touched.
+    <div
+      className={styles.keypad}
+      data-over={target.part === "settings" ? "measured" : "settings"}
+      data-keypad-zone
+      onMouseDown={(event) => event.preventDefault()}
+    >
       <Keypad
         label={labelOf(target)}
         text={typing.text}
@@ -54,14 +60,27 @@ function labelOf({ part, field }: TypingTarget): string {
   return observationStyles[field as ObservationNumber].label;
 }
 
-/** There is no OK key: a touch on anything that is not typed into closes the keypad. */
+const zones = "[data-keypad-zone], input, [role=group], [data-record-foot]";
+
+/**
+ * There is no OK key: a touch on anything that is not typed into closes the keypad. Where it began counts, not where it
+ * ended: opening the keypad moves the page under the finger.
+ */
 function useCloseBeside(open: boolean, close: () => void) {
+  const began = useRef<EventTarget | null>(null);
+  useEffect(() => {
+    const begin = (event: PointerEvent) => {
+      began.current = event.target;
+    };
+    document.addEventListener("pointerdown", begin, true);
+    return () => document.removeEventListener("pointerdown", begin, true);
+  }, []);
   useEffect(() => {
     if (!open) return;
     const leave = (event: MouseEvent) => {
-      const touched = event.target;
-      if (!(touched instanceof Element)) return;
-      if (!touched.closest("[data-keypad-zone], input, [role=group], [data-record-foot]")) close();
+      const touched = began.current ?? event.target;
+      began.current = null;
+      if (touched instanceof Element && !touched.closest(zones)) close();
     };
     document.addEventListener("click", leave);
     return () => document.removeEventListener("click", leave);
@@ -73,9 +92,9 @@ function useShowField(target: TypingTarget | null) {
   const name = target && `${target.part}.${target.field}`;
   useEffect(() => {
     if (!name) return;
-    const frame = requestAnimationFrame(() => {
-      document.querySelector(`[data-field="${name}"]`)?.scrollIntoView?.({ block: "nearest" });
-    });
-    return () => cancelAnimationFrame(frame);
+    const show = () => document.querySelector(`[data-field="${name}"]`)?.scrollIntoView?.({ block: "nearest" });
+    // Once the keypad stands and the page has reserved its height.
+    const timer = setTimeout(show, 60);
+    return () => clearTimeout(timer);
   }, [name]);
 }

@@ -19,14 +19,16 @@ interface FieldRowProps {
 /** One row of the form: label and unit, then the control; a refusal stands under both, in full. */
 export function FieldRow({ label, name, sub, bar = null, tall = false, error, errorId, children }: FieldRowProps) {
   return (
-    <div data-field={name} className="relative -mx-4 px-4 rule-row tablet:-mx-2 tablet:px-2">
+    <div data-field={name} className="relative -mx-4 px-4 rule-row tablet:mx-0 tablet:px-0">
       {bar && (
         <span
           aria-hidden="true"
-          className={`absolute inset-y-1 left-0 w-1 tablet:-left-0.5 ${bar === "outside" ? "bg-outside" : "bg-accent"}`}
+          className={`absolute inset-y-1 left-0 w-1 tablet:-left-2.5 ${bar === "outside" ? "bg-outside" : "bg-accent"}`}
         />
       )}
-      <div className={`${styles.row} flex items-center gap-2 ${tall ? "min-h-[72px] tablet:min-h-16" : "min-h-16"}`}>
+      <div
+        className={`${styles.row} flex items-center gap-2 ${tall ? "min-h-[71px] tablet:min-h-[63px]" : "min-h-[63px]"}`}
+      >
         <div className={`${styles.rowLabel} min-w-0 flex-1 leading-tight`}>
           <span className="block text-[17px] font-[620]">
             <Subscripted text={label} />

@@ -102,7 +102,9 @@ function effectWords({ worksheet, editing, now }: RecordState): string[] {
   const settings = draftedSettings(values, filled);
   if (Object.keys(settings).length === 0) return [];
   const { facts } = coreInputOf(worksheet);
-  const effect = lateEffect({ facts, chartedAt: filled.chartedAt, settings, now });
+  // The clock on screen moves in steps, and may stand before an entry that was just begun.
+  const atLeast = Math.max(now, Date.parse(filled.chartedAt));
+  const effect = lateEffect({ facts, chartedAt: filled.chartedAt, settings, now: atLeast });
   const late = now - Date.parse(filled.chartedAt) > 5 * minuteMs;
   const stays = effect.staysNow.map(
     ({ field, value }) => `${settingWords(field)} stays ${settingValueWords(field, value)} now.`,

@@ -5,6 +5,7 @@ import { addedMechanicsOf, observationOrder, openMechanicsOf } from "./form-fiel
 import { HoldReason } from "./hold-reason";
 import { MeasuredRow } from "./measured-row";
 import { PartHead } from "./part-head";
+import styles from "./record.module.css";
 import { useRecord } from "./use-record";
 import { YesNoRow } from "./yes-no-row";
 
@@ -18,7 +19,7 @@ export function MeasuredPart() {
   const open = asked || mechanics.length === 0 || hasAdded(editing.values);
   if (!can.mechanics && !can.observations) return null;
   return (
-    <section aria-label="Measured" className="px-4 tablet:px-2">
+    <section aria-label="Measured" className={`${styles.measured} px-4 tablet:px-0`}>
       <PartHead title="Measured" aside={mechanics.length > 0 ? "pressures in cmH2O" : undefined} />
       {mechanics.map((field) => (
         <MeasuredRow key={field} part="mechanics" field={field} />

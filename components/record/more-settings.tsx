@@ -4,11 +4,22 @@ import { useState } from "react";
 import { fieldsOfMode, type VentilationMode } from "@/lib/physiology";
 import { IeRow } from "./ie-row";
 import { SettingRow } from "./setting-row";
+import styles from "./record.module.css";
 import { useRecord } from "./use-record";
 import { YesNoRow } from "./yes-no-row";
 
 /** What is seldom changed: the flow's pattern, the trigger, and I:E for those who read it so. */
-export function MoreSettings({ mode }: { mode: VentilationMode }) {
+export function MoreSettings() {
+  const { mode, worksheet } = useRecord();
+  if (!mode || !worksheet.can.settingsFields.includes("mode")) return null;
+  return (
+    <section aria-label="More settings" className={`${styles.more} px-4 tablet:px-0`}>
+      <MoreRows mode={mode} />
+    </section>
+  );
+}
+
+function MoreRows({ mode }: { mode: VentilationMode }) {
   const [open, setOpen] = useState(false);
   const used = fieldsOfMode(mode);
   const timed = used.has("inspiratoryTimeS");

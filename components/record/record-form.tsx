@@ -15,6 +15,7 @@ import { FormNotices } from "./form-notices";
 import { liveSpan } from "./live-span";
 import { MeasuredPart } from "./measured-part";
 import { ModeSheet } from "./mode-sheet";
+import { MoreSettings } from "./more-settings";
 import { Notice } from "./notice";
 import { PartHead } from "./part-head";
 import { PatientHeader } from "./patient-header";
@@ -57,6 +58,7 @@ export function RecordForm({ screen, focus, onHeight }: RecordFormProps) {
         <TabletLadder onHeight={onHeight} />
         <SettingsPart onMode={() => setSheet("mode")} />
         <MeasuredPart />
+        <MoreSettings />
         <LiveSpan />
       </div>
       <ResultPanel onSave={screen.save} hindrance={useHindrance(screen)} />
@@ -68,11 +70,14 @@ export function RecordForm({ screen, focus, onHeight }: RecordFormProps) {
 
 function TabletLadder({ onHeight }: { onHeight: () => void }) {
   const { live, worksheet } = useRecord();
+  const { pbwKg, order, reading } = ladderOf(live.sheet);
   return (
-    <div className={`${styles.tabletOnly} ${styles.tabletLadder}`}>
+    <div className={`${styles.tabletOnly} ${styles.tabletLadder} pb-2`}>
       <VolumeLadder
         size="compact"
-        {...ladderOf(live.sheet)}
+        pbwKg={pbwKg}
+        order={order}
+        reading={reading}
         action={worksheet.can.heights && !worksheet.height && <Button onClick={onHeight}>Measure height</Button>}
       />
     </div>

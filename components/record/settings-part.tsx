@@ -4,8 +4,8 @@ import { timeOfDay } from "@/lib/format";
 import type { NumericSettingField } from "@/lib/physiology";
 import { Button } from "@/components/ui/button";
 import { settingRowsOf } from "./form-fields";
-import { MoreSettings } from "./more-settings";
 import { PartHead } from "./part-head";
+import styles from "./record.module.css";
 import { SettingRow } from "./setting-row";
 import { useRecord } from "./use-record";
 
@@ -18,7 +18,7 @@ export function SettingsPart({ onMode }: { onMode: () => void }) {
     ? settingRowsOf(mode).filter((field) => can.settingsFields.includes(field))
     : [];
   return (
-    <section aria-label="Settings" className="px-4 tablet:px-2">
+    <section aria-label="Settings" className={`${styles.set} px-4 tablet:px-0`}>
       <div className="max-tablet:sr-only">
         <PartHead title="Set" aside={lastCharted(worksheet)} />
       </div>
@@ -26,7 +26,6 @@ export function SettingsPart({ onMode }: { onMode: () => void }) {
       {rows.map((field) => (
         <SettingRow key={field} field={field} />
       ))}
-      {mode && can.settingsFields.includes("mode") && <MoreSettings mode={mode} />}
     </section>
   );
 }

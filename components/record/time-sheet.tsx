@@ -42,11 +42,13 @@ function TimeForm({ onClose }: { onClose: () => void }) {
       </Button>
       <TextField
         label={`Time by the clock of ${name}`}
-        type="time"
+        inputMode="numeric"
+        placeholder="14:20"
+        autoComplete="off"
         hint="Up to 24 h back. The form is filled anew with what was in force then; what you typed stays."
         error={refusal ?? undefined}
         value={time}
-        onChange={(event) => setTime(event.target.value)}
+        onChange={(event) => setTime(withColon(event.target.value))}
       />
       {moments.length > 1 && <p className="t-body">The clock showed this time twice. Which one?</p>}
       {!refusal &&
@@ -64,6 +66,12 @@ function TimeForm({ onClose }: { onClose: () => void }) {
   );
 }
 
+/** '1420' is typed faster in gloves than '14:20'. */
+function withColon(text: string): string {
+  const digits = /^(\d{2})(\d{2})$/.exec(text.trim());
+  return digits ? `${digits[1]}:${digits[2]}` : text.trim();
+}
+
 function momentWords(moment: string, now: number, timeZone: string, index: number | null): string {
   const late = latenessOf(moment, now);
   const which = index === null ? "" : index === 0 ? " before the clock went back" : " after the clock went back";
@@ -77,7 +85,7 @@ function refusalOfTime(
   moments: string[],
   { now, intubatedAt }: { now: number; intubatedAt: string },
 ): string | null {
-  if (!complete) return time === "" ? "Enter the time as hours and minutes." : null;
+  if (!complete) return time.length >= 5 || time === "" ? "Enter the time as hours and minutes, such as 14:20." : null;
   const [first] = moments;
   if (!first) return "The clock skipped this time: it was put forward that day.";
   return moments.map((at) => timeRefusal({ at, now, intubatedAt })).find((each) => each !== null) ?? null;

@@ -56,7 +56,8 @@ export function useRecordState({ initial, person, pending }: RecordInput): Recor
     const facts = withPending(coreInputOf(answered).facts, pending);
     return { ...answered, facts: facts as Worksheet["facts"] };
   }, [answered, pending]);
-  const now = useServerNow(worksheet.at);
+  // The clock on screen moves in steps: never before an entry of this page, which would not be in force yet.
+  const now = Math.max(useServerNow(worksheet.at), pending ? Date.parse(pending.filled.chartedAt) : 0);
   const core = useMemo(() => coreInputOf(worksheet), [worksheet]);
   const { timeZone } = worksheet.unit;
   const fillAt = (at: number | string) => fillForm({ facts: core.facts, at, timeZone });

@@ -2,7 +2,10 @@
 
 import { useEffect, useRef } from "react";
 
-/** Keeps what has focus clear of the pinned foot: the page scrolls as if it ended above it. */
+/**
+ * Keeps what has focus clear of the pinned foot: the fields' own scroll margin is its height. Padding of the page would
+ * not do, since what stands in the foot would then be scrolled to as well.
+ */
 export function useReserveFoot() {
   const foot = useRef<HTMLDivElement>(null);
   useEffect(() => {
@@ -11,13 +14,15 @@ export function useReserveFoot() {
     const root = document.documentElement;
     const reserve = () => {
       const pinned = getComputedStyle(element).position === "sticky";
-      root.style.scrollPaddingBottom = pinned ? `${element.offsetHeight + 12}px` : "";
+      root.style.setProperty("--record-foot", pinned ? `${element.offsetHeight + 8}px` : "0px");
     };
+    root.style.scrollPaddingBottom = "0px";
     const observer = new ResizeObserver(reserve);
     observer.observe(element);
     return () => {
       observer.disconnect();
       root.style.scrollPaddingBottom = "";
+      root.style.removeProperty("--record-foot");
     };
   }, []);
   return foot;

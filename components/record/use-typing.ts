@@ -27,7 +27,10 @@ export function useTyping({ set, values }: Named): Typing {
     [set],
   );
   const open = (next: TypingTarget, firstKey?: string) => {
-    if (firstKey === undefined && sameTarget(target, next)) return;
+    if (sameTarget(target, next)) {
+      if (firstKey !== undefined) write(next, text + firstKey);
+      return;
+    }
     setTarget(next);
     if (firstKey === undefined) setText(next.part === "settings" ? "" : (values[next.part][next.field] ?? ""));
     else write(next, firstKey);

@@ -71,7 +71,7 @@ export function Keypad(props: KeypadProps) {
 function useRealKeyboard(press: (key: KeypadKey) => void, onClose: () => void) {
   useEffect(() => {
     const listen = (event: KeyboardEvent) => {
-      if (event.ctrlKey || event.metaKey || event.altKey) return;
+      if (event.defaultPrevented || event.ctrlKey || event.metaKey || event.altKey) return;
       if (event.key === "Escape") return onClose();
       const key = keypadKey(event.key);
       if (key === null || takesText(event.target)) return;
