@@ -4,11 +4,7 @@ import { defineConfig } from "vitest/config";
 
 const root = fileURLToPath(new URL("./", import.meta.url));
 
-const alias = [
-  { find: /^@\//, replacement: root },
-  // The marker package throws outside a server bundle; tests run the server's code in plain Node.
-  { find: /^server-only$/, replacement: `${root}tests/server-only.ts` },
-];
+const alias = [{ find: /^@\//, replacement: root }];
 
 export default defineConfig({
   resolve: { alias },

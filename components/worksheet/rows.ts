@@ -2,7 +2,7 @@ import { modeSettings, type NumericSettingField, type VentilationMode } from "@/
 import type { DerivedName } from "@/lib/protocol/result";
 
 /** How a number is written: label, unit after it, digits after the point. */
-export interface NumberStyle {
+interface NumberStyle {
   label: string;
   unit: string;
   decimals: number;

@@ -54,7 +54,7 @@ export function SetColumn({ sheet, onHistory }: SetColumnProps) {
 }
 
 /** A set value keeps the decimals it was charted with. */
-export function writeSetting(value: number, decimals: number): string {
+function writeSetting(value: number, decimals: number): string {
   const charted = String(value).split(".")[1]?.length ?? 0;
   return displayNumber({ value, decimals: Math.max(decimals, charted) });
 }
