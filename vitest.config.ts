@@ -9,6 +9,8 @@ const alias = [{ find: /^@\//, replacement: root }];
 export default defineConfig({
   resolve: { alias },
   test: {
+    // Two cores run several suites at once: a slow moment is no failure.
+    testTimeout: 20_000,
     projects: [
       {
         extends: true,

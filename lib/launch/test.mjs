@@ -5,7 +5,7 @@ import { endLeftBehind, takeDataFolder } from "./data-lock.mjs";
 import { ensureDatabase } from "./database.mjs";
 import { ensureInstalled } from "./install.mjs";
 import { atEnd, launch } from "./lifetime.mjs";
-import { lastLine } from "./report.mjs";
+import { lastLine, suiteLine } from "./report.mjs";
 import { runE2e } from "./run-e2e.mjs";
 import { runVitest } from "./run-vitest.mjs";
 import { readSettings, root } from "./settings.mjs";
@@ -14,10 +14,9 @@ import { chooseSuites, VITEST_SUITES } from "./suites.mjs";
 const tally = { passed: 0, failed: 0, finished: false };
 
 function add(result) {
-  const { suite, passed, failed, why } = result;
-  tally.passed += passed;
-  tally.failed += failed;
-  console.log(`${suite}: ${passed} passed, ${failed} failed${why ? ` (${why})` : ""}`);
+  tally.passed += result.passed;
+  tally.failed += result.failed;
+  console.log(suiteLine(result));
 }
 
 async function clusterFor(suites, data) {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { countPlaywright, countVitest, judge, lastLine } from "@/lib/launch/report.mjs";
+import { countPlaywright, countVitest, judge, lastLine, suiteLine } from "@/lib/launch/report.mjs";
 import { warningsIn } from "@/lib/launch/server-log.mjs";
 import { chooseSuites, SUITES } from "@/lib/launch/suites.mjs";
 
@@ -19,11 +19,11 @@ describe("the sum of a run", () => {
   };
 
   it("counts each suite by its folder", () => {
-    expect(countVitest(report, "unit")).toEqual({ passed: 3, failed: 1 });
+    expect(countVitest(report, "unit")).toEqual({ passed: 3, failed: 1, skipped: 0 });
   });
 
   it("counts a file that could not be loaded as one failure", () => {
-    expect(countVitest(report, "integration")).toEqual({ passed: 0, failed: 1 });
+    expect(countVitest(report, "integration")).toEqual({ passed: 0, failed: 1, skipped: 0 });
   });
 
   it("a suite without a test is a failure", () => {
@@ -36,11 +36,20 @@ describe("the sum of a run", () => {
   });
 
   it("a runner that failed although every test passed is a failure", () => {
-    expect(judge({ passed: 5, failed: 0 }, 1)).toMatchObject({ passed: 5, failed: 1 });
+    expect(judge({ passed: 5, failed: 0, skipped: 0 }, 1)).toMatchObject({ passed: 5, failed: 1 });
   });
 
   it("a browser test that passed only at a second try has failed", () => {
-    expect(countPlaywright({ stats: { expected: 4, unexpected: 1, flaky: 1 } })).toEqual({ passed: 4, failed: 2 });
+    expect(countPlaywright({ stats: { expected: 4, unexpected: 1, flaky: 1 } })).toEqual({
+      passed: 4,
+      failed: 2,
+      skipped: 0,
+    });
+  });
+
+  it("says how many tests did not run", () => {
+    const count = countVitest({ testResults: [file("unit/a.test.ts", "passed", "passed", "skipped")] }, "unit");
+    expect(suiteLine({ suite: "unit", why: undefined, ...count })).toBe("unit: 1 passed, 0 failed, 1 skipped");
   });
 
   it("ends in one line", () => {
