@@ -3,6 +3,7 @@
 import { Subscripted } from "@/components/figures/subscripted";
 import { timeOfDay } from "@/lib/format";
 import { modeLabel, numericSettingFields, type NumericSettingField } from "@/lib/physiology";
+import { draftedMechanics, draftedObservations } from "./drafted-measurements";
 import { isChanged } from "./drafted-settings";
 import { filledMode } from "./filled";
 import { settingRowsOf, settingStyles } from "./form-fields";
@@ -81,7 +82,9 @@ function CheckOrChanged({ onCheck }: { onCheck: () => void }) {
       </p>
     );
   }
-  if (!worksheet.can["settings-checks"] || filledMode(editing.filled) === null) return null;
+  const entered = draftedMechanics(editing.values) ?? draftedObservations(editing.values);
+  // A check confirms settings and charts nothing else: beside typed measurements it would leave them behind.
+  if (entered || !worksheet.can["settings-checks"] || filledMode(editing.filled) === null) return null;
   return (
     <button
       type="button"

@@ -74,17 +74,16 @@ export function useRecordScreen({ initial, person }: { initial: Worksheet; perso
     flow.send(sending);
   };
   const found = (draft: RecordDraft) => {
-    if (editing.begun) return;
-    if (draft.filled) {
-      editing.restore(draft.values, draft.filled);
-      setRestored(true);
-    }
-    setClientKey(draft.clientKey);
-    if (draft.bedId !== worksheet.episode.bed?.id) setBed(draft.bedId ? { id: draft.bedId, label: "" } : null);
     if (draft.sending) {
       setView("sent");
       flow.send(draft.sending);
     }
+    // Whoever was quicker than the device's store goes on with what is typed already.
+    if (editing.begun || !draft.filled) return;
+    editing.restore(draft.values, draft.filled);
+    setRestored(true);
+    setClientKey(draft.clientKey);
+    if (draft.bedId !== worksheet.episode.bed?.id) setBed(draft.bedId ? { id: draft.bedId, label: "" } : null);
   };
   const { failed } = useRecordDraft({
     owner: { userId: person.id, episodeId: worksheet.episode.id, form: "record" },
