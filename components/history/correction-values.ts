@@ -1,11 +1,19 @@
 import { fio2FromInput, instantsOfWallTime, localDate, timeOfDay } from "@/lib/format";
-import type { Entry } from "@/lib/contracts";
+import { lengthOfMethod, type Entry } from "@/lib/contracts";
 
 /** The fields of an entry that a correction form edits as text. */
 export function editableFields(entry: Entry): { field: string; text: string }[] {
-  return Object.entries(entry.body ?? {})
+  return Object.entries(withoutWorkedOutHeight(entry))
     .filter(([, value]) => typeof value === "number")
     .map(([field, value]) => ({ field, text: field === "fio2" ? Number(value).toFixed(2) : String(value) }));
+}
+
+/** A height estimated from a length is corrected by that length; the height is worked out from it again. */
+function withoutWorkedOutHeight({ kind, body }: Entry): Record<string, unknown> {
+  const estimated = kind === "heights" && String(body?.method) in lengthOfMethod;
+  if (!estimated) return { ...body };
+  const { heightCm: _workedOut, ...measured } = body ?? {};
+  return measured;
 }
 
 /** Typed text as a number; a decimal comma counts as a point. */
@@ -20,7 +28,7 @@ export function correctedEntry(
   typed: Record<string, string>,
   chartedAt: string,
 ): Record<string, unknown> {
-  const body: Record<string, unknown> = { ...entry.body, chartedAt };
+  const body: Record<string, unknown> = { ...withoutWorkedOutHeight(entry), chartedAt };
   for (const { field } of editableFields(entry)) {
     const text = typed[field] ?? "";
     if (text.trim() === "") delete body[field];

@@ -32,12 +32,17 @@ export function TopBar({ here, worksheetHref, unit, userName, now, clinical = tr
       ]
     : [];
   return (
-    <header data-screen-only className="flex h-13 items-center gap-3 border-b border-hair bg-paper page-margin">
+    <header
+      data-screen-only
+      className="flex h-13 items-center gap-2 border-b border-hair bg-paper page-margin tablet:gap-3"
+    >
       <span className="hidden tablet:inline-flex">
         <Wordmark />
       </span>
       <span className="flex items-center gap-2.5 tablet:hidden">
-        <Mark />
+        <span className="max-[359px]:hidden">
+          <Mark />
+        </span>
         <span className="text-[18px] font-[680]">{here ? titles[here] : "Neaptide"}</span>
       </span>
       <DemoChip />
@@ -56,7 +61,7 @@ export function TopBar({ here, worksheetHref, unit, userName, now, clinical = tr
       <div className="ml-auto flex min-w-0 items-center gap-3 tablet:gap-4 desk:gap-6">
         {unit && (
           <span
-            className={`truncate text-[15px] text-muted tablet:hidden desk:inline ${here === "beds" ? "" : "max-tablet:hidden"}`}
+            className={`truncate text-[15px] text-muted max-[359px]:hidden tablet:hidden desk:inline ${here === "beds" ? "" : "max-tablet:hidden"}`}
           >
             {unit.name}
             {unit.shift && <span className="hidden desk:inline">, {unit.shift}</span>}

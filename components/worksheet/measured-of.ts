@@ -3,7 +3,7 @@ import type { Derived, Value, Worksheet } from "@/lib/contracts";
 import type { FreshnessProps } from "@/components/figures/freshness";
 import { displayNumber, timeOfDay } from "@/lib/format";
 import { freshnessOf, lastOutsideTime, type Reading } from "./freshness-of";
-import { noteWords } from "./note-words";
+import { whyUnmeasured } from "./note-words";
 import type { MeasuredRow } from "./rows";
 
 /** A measured cell: its number while that may be read as true, and how fresh it is. */
@@ -33,7 +33,7 @@ export function measuredOf(sheet: Worksheet, row: MeasuredRow, now: number): Mea
   const charted = chartedOf(sheet, row);
   const derived = row.derived ? sheet.derived[row.derived] : undefined;
   const reading = derived ?? sheet.measured[row.field] ?? unhurried(charted);
-  const stands = derived ? derived.value !== null : reading.freshness === "current" || reading.freshness === "due";
+  const stands = derived ? derived.value !== null : isFresh(reading);
   const last = derived ? derived.lastValue : numberOf(charted);
   const value = derived ? derived.value : stands ? last : null;
   const limits = [derived?.limit?.min, derived?.limit?.max].filter((limit) => limit !== undefined);
@@ -49,11 +49,13 @@ export function measuredOf(sheet: Worksheet, row: MeasuredRow, now: number): Mea
     everCharted: charted !== undefined || last !== null,
     lastOutsideAt: (derived && lastOutsideTime(derived, timeZone)) ?? null,
     notAsked: derived?.state === "not-asked",
-    note: derived && derived.value === null ? noteWords(derived.notes) : null,
+    note: derived && derived.value === null && isFresh(derived) ? whyUnmeasured(derived.notes) : null,
     judged:
       derived && row.derived && row.derived in trackDomains ? { ...derived, metric: row.derived as TrackMetric } : null,
   };
 }
+
+const isFresh = ({ freshness }: Reading) => freshness === "current" || freshness === "due";
 
 /** A reading that no change expires and no interval asks for: true as of its time. */
 function unhurried(charted: Value | undefined): Reading {

@@ -20,3 +20,10 @@ export function noteWords(notes: readonly string[]): string | null {
   const known = Object.keys(words).find((code) => notes.includes(code));
   return known === undefined ? null : (words[known] ?? null);
 }
+
+const reasons = ["patient-effort", "needs-total-peep", "needs-height", "needs-sex"];
+
+/** Why a fresh reading still gives no number, where a note says so; what its last value rested on is no reason. */
+export function whyUnmeasured(notes: readonly string[]): string | null {
+  return noteWords(notes.filter((code) => reasons.includes(code)));
+}

@@ -27,9 +27,9 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
         )}
       </div>
       <VolumeLadder size="phone" {...ladderOf(sheet)} />
-      <div className="flex gap-4 pt-3">
+      <div className="flex flex-wrap gap-4 pt-3">
         <PressureSpan size="phone" {...spanOf(sheet, now)} />
-        <div className="flex-1">
+        <div className="min-w-[130px] flex-1">
           <p className="t-label text-muted">Driving pressure</p>
           <Result value={driving?.value ?? null} decimals={0} unit="cmH2O" limit={driving?.limit} />
           <PhoneState derived={driving} timeZone={sheet.unit.timeZone} />

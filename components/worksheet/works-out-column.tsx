@@ -7,7 +7,7 @@ import { arithmeticOf } from "./arithmetic";
 import { ColumnHead } from "./column-head";
 import { freshnessOf, lastOutsideTime } from "./freshness-of";
 import { Judged } from "./judged";
-import { noteWords } from "./note-words";
+import { noteWords, whyUnmeasured } from "./note-words";
 import { derivedRows, gasDerivedRows, lastDerivedRows, type DerivedRow } from "./rows";
 import { NotMeasured, SheetCell, SheetNumber } from "./sheet-cell";
 
@@ -96,7 +96,8 @@ function Unmeasured({ row, derived, clock }: Pick<DerivedCellProps, "row" | "der
   if (derived.state === "not-asked") return <span className="t-body text-muted">not asked</span>;
   const lastOutsideAt = lastOutsideTime(derived, clock.timeZone);
   if (lastOutsideAt) return <StateWord state="unmeasured" lastOutsideAt={lastOutsideAt} />;
-  const note = noteWords(derived.notes);
-  if (note) return <NotMeasured why={note} />;
+  const stale = derived.freshness === "changed-since" || derived.freshness === "lapsed";
+  const why = stale ? null : (whyUnmeasured(derived.notes) ?? (derived.freshness === "missing" ? null : row.needs));
+  if (why) return <NotMeasured why={why} />;
   return <Freshness {...freshnessOf(derived, clock, row.needs)} narrow />;
 }

@@ -1,6 +1,7 @@
 import { render, screen, waitFor, within } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { describe, expect, it } from "vitest";
+import { correctedEntry, editableFields } from "@/components/history/correction-values";
 import type { Entry } from "@/lib/contracts";
 import { at, firstFacts, judgedWorksheet } from "./judged-worksheet";
 import { http, worksheetPage } from "./worksheet-page";
@@ -124,5 +125,19 @@ describe("the history of a value", () => {
     await waitFor(() => expect(http.sent).toHaveLength(2));
     const [first, second] = http.sent.map(({ body }) => (body as { clientKey: string }).clientKey);
     expect(first).not.toBe(second);
+  });
+
+  it("corrects an estimated height by the length that was measured, never by the height worked out from it", () => {
+    const ulna = entry({
+      kind: "heights",
+      body: { method: "ulna", sexForPbw: "female", ulnaCm: 25, heightCm: 164.85 },
+    });
+    expect(editableFields(ulna)).toEqual([{ field: "ulnaCm", text: "25" }]);
+    expect(correctedEntry(ulna, { ulnaCm: "25,5" }, at("10:30"))).toEqual({
+      method: "ulna",
+      sexForPbw: "female",
+      ulnaCm: 25.5,
+      chartedAt: at("10:30"),
+    });
   });
 });

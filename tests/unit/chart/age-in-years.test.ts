@@ -13,7 +13,8 @@ describe("ageInYears", () => {
     expect(ageInYears({ birthDate: "2008-02-29", onDate: "2028-02-29" })).toBe(20);
   });
 
-  it("is negative before birth", () => {
-    expect(ageInYears({ birthDate: "2027-01-01", onDate: "2026-12-01" })).toBe(-1);
+  it("counts no year before birth", () => {
+    expect(ageInYears({ birthDate: "2027-01-01", onDate: "2026-12-01" })).toBe(0);
+    expect(ageInYears({ birthDate: "2029-01-01", onDate: "2026-12-01" })).toBe(-2);
   });
 });
