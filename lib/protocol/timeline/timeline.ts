@@ -12,6 +12,7 @@ import type {
   TherapyFact,
 } from "../facts";
 import type { Change } from "./change-kinds";
+import { chartedReadings } from "./charted-readings";
 import { changesPerRow, type ExpiryRow } from "./expiry-rows";
 import { foldSettings, type Snapshot } from "./fold-settings";
 import { holdsOf, isPlateau, type Hold } from "./holds";
@@ -64,39 +65,8 @@ export interface Timeline {
   all: (readonly { t: number }[])[];
 }
 
-function holding<Fact, Field extends keyof Fact>(items: readonly { t: number; fact: Fact }[], field: Field) {
-  return items.filter(({ fact }) => fact[field] !== null && fact[field] !== undefined);
-}
-
-function readings(facts: Facts) {
-  const mechanics = itemsInOrder(facts.mechanics);
-  const observations = itemsInOrder(facts.observations);
-  const rates: Item<MechanicsFact | ObservationFact>[] = [
-    ...(holding(mechanics, "respiratoryRateTotal") as Mechanics[]),
-    ...(holding(observations, "respiratoryRateTotal") as Item<ObservationFact>[]),
-  ];
-  const gases = itemsInOrder(facts.bloodGases).filter(({ fact }) => fact.specimen === "arterial");
-  return {
-    mechanics,
-    observations,
-    exhaled: holding(mechanics, "exhaledTidalVolumeMl") as Mechanics[],
-    spontaneous: holding(mechanics, "spontaneousTidalVolumeMl") as Mechanics[],
-    minuteVolumes: holding(mechanics, "minuteVolumeLPerMin") as Mechanics[],
-    peaks: holding(mechanics, "peakCmH2O") as Mechanics[],
-    totalPeeps: holding(mechanics, "totalPeepCmH2O") as Mechanics[],
-    meanPressures: holding(mechanics, "meanAirwayPressureCmH2O") as Mechanics[],
-    totalRates: rates.sort((a, b) => a.t - b.t),
-    spo2: holding(observations, "spo2Percent") as Item<ObservationFact>[],
-    etco2: holding(observations, "etco2MmHg") as Item<ObservationFact>[],
-    gases,
-    pao2: holding(gases, "pao2MmHg") as Gas[],
-    paco2: holding(gases, "paco2MmHg") as Gas[],
-    ph: holding(gases, "ph") as Gas[],
-  };
-}
-
 function build(facts: Facts): Timeline {
-  const { mechanics, observations, ...measured } = readings(facts);
+  const { mechanics, observations, ...measured } = chartedReadings(facts);
   const settings = itemsInOrder(facts.settings);
   const snapshots = foldSettings(settings);
   const charted = {
@@ -124,9 +94,6 @@ function build(facts: Facts): Timeline {
     snapshots,
     changes: changesPerRow(changes),
     exhaledWithRate: mechanics.filter(isProduct),
-    breathVolumes: mechanics.filter(
-      ({ fact }) => typeof fact.spontaneousTidalVolumeMl === "number" || typeof fact.exhaledTidalVolumeMl === "number",
-    ),
     minuteVolumesOrProducts: mechanics.filter(
       (item) => typeof item.fact.minuteVolumeLPerMin === "number" || isProduct(item),
     ),
