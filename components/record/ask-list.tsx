@@ -20,7 +20,7 @@ export function AskList({ wanted }: { wanted: number }) {
     else editing.set("confirmed", [...editing.values.confirmed, key]);
   };
   return (
-    <section ref={list} aria-label="To confirm" className="max-h-[40dvh] overflow-y-auto pb-2">
+    <section ref={list} aria-label="To confirm" className="pb-2">
       {readiness.asks.map(({ key, question, yes, no }) => (
         <div
           key={key}

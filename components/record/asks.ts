@@ -30,7 +30,7 @@ function isCovered(field: ChartedField, { targets, pbwKg }: AskContext): boolean
 
 const say = (field: ChartedField, value: number) => [value, unitOf(field)].join(" ").trim();
 
-export function unusualAsk(field: ChartedField, value: number): Ask {
+function unusualAsk(field: ChartedField, value: number): Ask {
   return {
     key: `${field}=${value}`,
     question: `${wordsOf(field)} ${say(field, value)} is unusual.`,

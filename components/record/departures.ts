@@ -12,13 +12,13 @@ interface OrderContext {
 
 const judgedFields = ["tidalVolumeMl", "pressureAbovePeepCmH2O", "peepCmH2O"] as const;
 
-export function settingsBefore(filled: Filled): JudgedSettings | null {
+function settingsBefore(filled: Filled): JudgedSettings | null {
   const mode = filledMode(filled);
   if (!mode) return null;
   return { mode, ...Object.fromEntries(judgedFields.map((field) => [field, filledNumber(filled, field)])) };
 }
 
-export function settingsAfter(values: RecordValues, filled: Filled): JudgedSettings {
+function settingsAfter(values: RecordValues, filled: Filled): JudgedSettings {
   const mode = shownMode(values, filled);
   return { mode, ...Object.fromEntries(judgedFields.map((field) => [field, shownNumber(values, filled, field)])) };
 }

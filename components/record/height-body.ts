@@ -21,7 +21,7 @@ import {
 import { typedNumber } from "./typed-number";
 
 /** The small height form as typed. */
-export const heightValuesSchema = z.object({
+const heightValuesSchema = z.object({
   method: z.enum(heightMethods).nullable(),
   sex: z.enum(["male", "female"]).nullable(),
   inFeet: z.boolean(),

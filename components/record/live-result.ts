@@ -9,10 +9,7 @@ import type { RecordValues } from "./record-values";
 import { refusalKey, type Refusals } from "./refusals";
 
 /** A worksheet as it would read with the form's entry charted: what the figures draw from while a person types. */
-export type LiveSheet = Pick<
-  Worksheet,
-  "settings" | "mechanics" | "derived" | "targets" | "unit" | "pbwKg" | "measured"
->;
+type LiveSheet = Pick<Worksheet, "settings" | "mechanics" | "derived" | "targets" | "unit" | "pbwKg" | "measured">;
 
 export interface LiveResult {
   sheet: LiveSheet;

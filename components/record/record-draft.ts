@@ -9,7 +9,7 @@ const entrySchema = z.discriminatedUnion("route", [
 ]);
 
 /** An entry on its way: the body under its key, and the form it came from, should the server refuse it. */
-export const sendingSchema = z.object({ entry: entrySchema, values: recordValuesSchema, filled: filledSchema });
+const sendingSchema = z.object({ entry: entrySchema, values: recordValuesSchema, filled: filledSchema });
 
 export type Sending = z.infer<typeof sendingSchema>;
 

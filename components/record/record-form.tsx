@@ -11,6 +11,7 @@ import { useDraftInOtherTab } from "@/lib/client/use-draft-in-other-tab";
 import { draftKey } from "@/lib/client/drafts";
 import { timeOfDay } from "@/lib/format";
 import { timeRefusal } from "./entry-time";
+import { EntryKeypad } from "./entry-keypad";
 import { FormNotices } from "./form-notices";
 import { liveSpan } from "./live-span";
 import { MeasuredPart } from "./measured-part";
@@ -24,6 +25,7 @@ import { SettingsPart } from "./settings-part";
 import { SpanWords } from "./span-words";
 import { TimeSheet } from "./time-sheet";
 import { TitleRow } from "./title-row";
+import { useIsTablet } from "./use-is-tablet";
 import { useFocusFromAddress, type FormFocus } from "./use-focus-from-address";
 import { useRecord } from "./use-record";
 import type { RecordScreenState } from "./use-record-screen";
@@ -43,6 +45,7 @@ export function RecordForm({ screen, focus, onHeight }: RecordFormProps) {
     draftKey({ userId: person.id, episodeId: worksheet.episode.id, form: "record" }),
   );
   useFocusFromAddress(focus);
+  const isTablet = useIsTablet();
   return (
     <>
       <PatientHeader worksheet={worksheet} onHeight={onHeight}>
@@ -60,6 +63,7 @@ export function RecordForm({ screen, focus, onHeight }: RecordFormProps) {
         <MeasuredPart />
         <MoreSettings />
         <LiveSpan />
+        {isTablet && <EntryKeypad />}
       </div>
       <ResultPanel onSave={screen.save} hindrance={useHindrance(screen)} />
       <TimeSheet open={sheet === "time"} onClose={() => setSheet(null)} />

@@ -10,6 +10,7 @@ import { EntryKeypad } from "./entry-keypad";
 import { ReasonChoice } from "./reason-choice";
 import styles from "./record.module.css";
 import { ResultCells } from "./result-cells";
+import { useIsTablet } from "./use-is-tablet";
 import { useReserveFoot } from "./use-reserve-foot";
 import { useRecord } from "./use-record";
 
@@ -23,6 +24,7 @@ interface ResultPanelProps {
 export function ResultPanel({ onSave, hindrance }: ResultPanelProps) {
   const { typing, live } = useRecord();
   const foot = useReserveFoot();
+  const isTablet = useIsTablet();
   const { blocker, said, press, wanted } = useSave(onSave, hindrance);
   const ladder = ladderOf(live.sheet);
   return (
@@ -45,7 +47,7 @@ export function ResultPanel({ onSave, hindrance }: ResultPanelProps) {
           {blocker}
         </p>
       )}
-      <EntryKeypad />
+      {!isTablet && <EntryKeypad />}
     </div>
   );
 }

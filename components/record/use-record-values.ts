@@ -5,7 +5,7 @@ import { useForm, useWatch, type FieldPath, type FieldPathValue } from "react-ho
 import type { Filled } from "./filled";
 import { emptyRecord, type RecordValues } from "./record-values";
 
-export type SetRecordValue = <Name extends FieldPath<RecordValues>>(
+type SetRecordValue = <Name extends FieldPath<RecordValues>>(
   name: Name,
   value: FieldPathValue<RecordValues, Name>,
 ) => void;

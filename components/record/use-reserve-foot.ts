@@ -14,7 +14,7 @@ export function useReserveFoot() {
     const root = document.documentElement;
     const reserve = () => {
       const pinned = getComputedStyle(element).position === "sticky";
-      root.style.setProperty("--record-foot", pinned ? `${element.offsetHeight + 8}px` : "0px");
+      root.style.setProperty("--record-foot", pinned ? `${element.offsetHeight}px` : "0px");
     };
     root.style.scrollPaddingBottom = "0px";
     const observer = new ResizeObserver(reserve);

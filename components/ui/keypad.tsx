@@ -4,7 +4,7 @@ import { Delete } from "lucide-react";
 import { useEffect } from "react";
 import { keypadKey, typedText, type KeypadKey } from "./typed-text";
 
-export interface KeypadChoice {
+interface KeypadChoice {
   value: string;
   words: string;
   /** Set apart from those above it ('not possible'). */

@@ -11,8 +11,8 @@ const LONGEST_WAIT_S = 30;
 const HOUR_S = 60 * 60;
 
 /** 1, 2, 4 … 30 s: what follows the n-th failure beyond the free ones, n from 1. */
-function waitSeconds(beyondFree: number): number {
-  return Math.min(LONGEST_WAIT_S, 2 ** (beyondFree - 1));
+function waitSeconds(turn: number): number {
+  return Math.min(LONGEST_WAIT_S, 2 ** (turn - 1));
 }
 
 function limiter(keyPrefix: string, duration: number) {
@@ -30,6 +30,7 @@ function limiter(keyPrefix: string, duration: number) {
 function makeLimiters() {
   return {
     failures: limiter("failures", HOUR_S),
+    turns: limiter("turns", HOUR_S),
     wait: limiter("wait", LONGEST_WAIT_S),
     known: limiter("known", 12 * HOUR_S),
   };
@@ -54,17 +55,23 @@ function slowDown(seconds: number): AppError {
   });
 }
 
-/** Takes the one try that a wait allows; whoever comes while it runs is told how long it still lasts. */
-async function takeTurn(key: string, seconds: number): Promise<void> {
-  const { wait, failures } = (limiters ??= makeLimiters());
+/**
+ * Takes the one try that a wait allows, and answers how long the next one waits if this fails. Whoever comes while the
+ * wait runs is told how long it still lasts.
+ */
+async function takeTurn(key: string): Promise<number> {
+  const { wait, failures, turns } = (limiters ??= makeLimiters());
+  // Counted by turns, not by tries: those that come at once and are not looked at make the wait no longer.
+  const seconds = waitSeconds(((await turns.get(key))?.consumedPoints ?? 0) + 1);
   try {
     await wait.consume(key, 1, { customDuration: seconds });
   } catch (refusal) {
     if (!(refusal instanceof RateLimiterRes)) throw refusal;
-    // A try that was not looked at is no failure.
     await failures.reward(key, 1);
     throw slowDown(Math.ceil(refusal.msBeforeNext / 1000));
   }
+  await turns.penalty(key, 1);
+  return seconds;
 }
 
 /**
@@ -73,18 +80,18 @@ async function takeTurn(key: string, seconds: number): Promise<void> {
  * @throws AppError `slow-down` with Retry-After, during a wait and on the failure that begins one
  */
 export async function slowed<Result>(pair: Pair, attempt: () => Promise<Result | null>): Promise<Result | null> {
-  const { failures, wait, known } = (limiters ??= makeLimiters());
+  const { failures, turns, wait, known } = (limiters ??= makeLimiters());
   const key = keyOf(pair);
   const waiting = await wait.get(key);
   if (waiting && waiting.msBeforeNext > 0) throw slowDown(Math.ceil(waiting.msBeforeNext / 1000));
   const free = (await known.get(key)) ? FREE_FAILURES_WHERE_KNOWN : FREE_FAILURES;
   // Counted before the password is looked at, so that many tries at once are not all looked at.
   const { consumedPoints } = await failures.penalty(key, 1);
-  const seconds = consumedPoints > free ? waitSeconds(consumedPoints - free) : 0;
-  if (seconds > 0) await takeTurn(key, seconds);
+  const seconds = consumedPoints > free ? await takeTurn(key) : 0;
   const result = await attempt();
   if (result === null && seconds > 0) throw slowDown(seconds);
   if (result === null) return null;
-  await Promise.all([failures.delete(key), wait.delete(key), known.set(key, 1, 12 * HOUR_S)]);
+  await Promise.all([failures, turns, wait].map((each) => each.delete(key)));
+  await known.set(key, 1, 12 * HOUR_S);
   return result;
 }

@@ -5,7 +5,7 @@ import { useState, type ReactNode } from "react";
 import { canBeSentAgain, waitBeforeTry } from "./can-be-sent-again";
 
 /** One client a page: answers are held, refused requests are not repeated, lost ones are, three times. */
-export function makeQueryClient(): QueryClient {
+function makeQueryClient(): QueryClient {
   return new QueryClient({
     defaultOptions: {
       queries: {

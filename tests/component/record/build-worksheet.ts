@@ -30,7 +30,7 @@ export const settingsCharted = {
   flowPattern: "decelerating",
 } as const;
 
-export const readingCharted = {
+const readingCharted = {
   plateauCmH2O: 24,
   hold: "relaxed",
   peakCmH2O: 31,
@@ -40,7 +40,7 @@ export const readingCharted = {
 
 const everySetting = [...Object.keys(settingsCharted), "pressureAbovePeepCmH2O", "pressureSupportCmH2O"];
 
-export const everyRight: Worksheet["can"] = {
+const everyRight: Worksheet["can"] = {
   settingsFields: everySetting,
   correct: true,
   moveBed: true,

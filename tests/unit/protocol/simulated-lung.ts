@@ -10,7 +10,7 @@ export interface Lung {
   resistanceCmH2OPerLPerS: number;
 }
 
-export interface Setting {
+interface Setting {
   tidalVolumeMl: number;
   peepCmH2O: number;
   respiratoryRate: number;
