@@ -1,4 +1,3 @@
-import { z } from "zod";
 import {
   heightMethods,
   lengthOfMethod,
@@ -21,18 +20,16 @@ import {
 import { typedNumber } from "./typed-number";
 
 /** The small height form as typed. */
-const heightValuesSchema = z.object({
-  method: z.enum(heightMethods).nullable(),
-  sex: z.enum(["male", "female"]).nullable(),
-  inFeet: z.boolean(),
-  length: z.string(),
-  feet: z.string(),
-  inches: z.string(),
-  reason: z.string(),
-  confirmed: z.boolean(),
-});
-
-export type HeightValues = z.infer<typeof heightValuesSchema>;
+export interface HeightValues {
+  method: HeightMethod | null;
+  sex: "male" | "female" | null;
+  inFeet: boolean;
+  length: string;
+  feet: string;
+  inches: string;
+  reason: string;
+  confirmed: boolean;
+}
 
 export const emptyHeight: HeightValues = {
   method: null,
