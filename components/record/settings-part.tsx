@@ -3,8 +3,8 @@
 import { timeOfDay } from "@/lib/format";
 import type { NumericSettingField } from "@/lib/physiology";
 import { Button } from "@/components/ui/button";
+import { ColumnHead } from "@/components/worksheet/column-head";
 import { settingRowsOf } from "./form-fields";
-import { PartHead } from "./part-head";
 import styles from "./record.module.css";
 import { SettingRow } from "./setting-row";
 import { useRecord } from "./use-record";
@@ -20,7 +20,7 @@ export function SettingsPart({ onMode }: { onMode: () => void }) {
   return (
     <section aria-label="Settings" className={`${styles.set} px-4 tablet:px-0`}>
       <div className="max-tablet:sr-only">
-        <PartHead title="Set" aside={lastCharted(worksheet)} />
+        <ColumnHead title="Set" aside={lastCharted(worksheet)} />
       </div>
       {!mode && <FirstMode onMode={can.settingsFields.includes("mode") ? onMode : null} />}
       {rows.map((field) => (
