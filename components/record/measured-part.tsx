@@ -4,7 +4,7 @@ import { useState } from "react";
 import { addedMechanicsOf, observationOrder, openMechanicsOf } from "./form-fields";
 import { HoldReason } from "./hold-reason";
 import { MeasuredRow } from "./measured-row";
-import { PartHead } from "./part-head";
+import { ColumnHead } from "@/components/worksheet/column-head";
 import styles from "./record.module.css";
 import { useRecord } from "./use-record";
 import { YesNoRow } from "./yes-no-row";
@@ -20,7 +20,7 @@ export function MeasuredPart() {
   if (!can.mechanics && !can.observations) return null;
   return (
     <section aria-label="Measured" className={`${styles.measured} px-4 tablet:px-0`}>
-      <PartHead title="Measured" aside={mechanics.length > 0 ? "pressures in cmH2O" : undefined} />
+      <ColumnHead title="Measured" aside={mechanics.length > 0 ? "pressures in cmH2O" : undefined} />
       {mechanics.map((field) => (
         <MeasuredRow key={field} part="mechanics" field={field} />
       ))}

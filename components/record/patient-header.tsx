@@ -54,8 +54,7 @@ export function PatientHeader({ worksheet, onHeight, children }: PatientHeaderPr
 
 function Pbw({ worksheet, onHeight }: Pick<PatientHeaderProps, "worksheet" | "onHeight">) {
   const { pbwKg, height, can } = worksheet;
-  const cell =
-    "max-w-[108px] shrink-0 text-right leading-tight tablet:max-w-none tablet:self-stretch tablet:border-l tablet:border-hair tablet:pl-5 tablet:text-left";
+  const cell = `${styles.pbw} max-w-[108px] shrink-0 text-right leading-tight tablet:max-w-none tablet:self-stretch tablet:border-l tablet:border-hair tablet:pl-5 tablet:text-left`;
   if (!height && can.heights) {
     return (
       <button type="button" onClick={onHeight} className="min-h-11 shrink-0 rounded-[6px] px-3 t-state control">

@@ -18,7 +18,7 @@ import { MeasuredPart } from "./measured-part";
 import { ModeSheet } from "./mode-sheet";
 import { MoreSettings } from "./more-settings";
 import { Notice } from "./notice";
-import { PartHead } from "./part-head";
+import { ColumnHead } from "@/components/worksheet/column-head";
 import { PatientHeader } from "./patient-header";
 import { ResultPanel } from "./result-panel";
 import { SettingsPart } from "./settings-part";
@@ -92,7 +92,7 @@ function LiveSpan() {
   const { live, now } = useRecord();
   return (
     <section aria-label="Pressure span" className={styles.span}>
-      <PartHead title="Pressure span" aside="cmH2O" />
+      <ColumnHead title="Pressure span" aside="cmH2O" />
       <div className="pt-2">
         <PressureSpan size="medium" {...liveSpan(live, now)} />
       </div>

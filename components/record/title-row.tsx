@@ -89,7 +89,7 @@ function CheckOrChanged({ onCheck }: { onCheck: () => void }) {
     <button
       type="button"
       onClick={onCheck}
-      className="min-h-[56px] w-[110px] rounded-[8px] px-3 text-left text-[16px] leading-tight font-[640] control"
+      className={`${styles.check} min-h-[56px] w-[110px] rounded-[8px] px-3 text-left text-[16px] leading-tight font-[640] control`}
     >
       Checked, unchanged
     </button>

@@ -106,6 +106,18 @@ describe("what a change expires", () => {
     }
   });
 
+  it("F6 a turn back to supine, and one out of prone, are turns; one between the sides is none", () => {
+    const turned = (from: string, to: string) => {
+      const positions = [fact("08:30", { position: from }), fact("10:30", { position: to })];
+      const facts = { ...read("10:00"), positions } as unknown as Facts;
+      return judge("10:31", { facts }).derived.paco2MmHg.freshness;
+    };
+    expect(turned("left-lateral", "supine")).toBe("changed-since");
+    expect(turned("prone", "supine")).toBe("changed-since");
+    expect(turned("prone", "right-lateral")).toBe("changed-since");
+    expect(turned("left-lateral", "right-lateral")).toBe("current");
+  });
+
   it("F6 pressure above PEEP counts as pressure", () => {
     const answer = after({ settings: { pressureAbovePeepCmH2O: 15 } }, pressureControl);
     expect(answer.derived.plateauCmH2O.freshness).toBe("changed-since");

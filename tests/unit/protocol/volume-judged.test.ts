@@ -215,6 +215,7 @@ describe("the volume's edge", () => {
     // 6 × 70.566 = 423.396 mL.
     expect(state(420, 6, 8)).toBe("edge");
     expect(state(418.4, 6, 8)).toBe("edge");
+    expect(state(6 * pbwKg - 5, 6, 8)).toBe("edge");
     expect(state(418.3, 6, 8)).toBe("outside");
     expect(state(569, 6, 8)).toBe("edge");
     expect(state(570, 6, 8)).toBe("outside");
