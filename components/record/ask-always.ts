@@ -23,7 +23,7 @@ function volumeAsk(field: "tidalVolumeMl" | "exhaledTidalVolumeMl", volume: numb
   const each = perKg === null ? "" : `, ${written(perKg)} mL/kg,`;
   return {
     key: `${field}=${volume}`,
-    question: `${words} ${volume} mL${each} is far beyond the ordered limit.`,
+    question: `${words} ${volume} mL${each} is far beyond the limit.`,
     yes: `Yes, ${volume} mL`,
   };
 }
