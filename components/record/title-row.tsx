@@ -30,7 +30,7 @@ export function TitleRow({ onTime, onMode, onCheck }: TitleRowProps) {
         label={mode ? `Change the mode, now ${modeLabel(mode)}` : "Choose the mode"}
         onPress={mayChangeMode ? onMode : null}
       />
-      <div className="ml-auto pl-2">
+      <div className="ml-auto pl-2 max-[359px]:pl-1">
         <CheckOrChanged onCheck={onCheck} />
       </div>
     </div>
@@ -46,8 +46,8 @@ interface CellProps {
 }
 
 function Cell({ words, action, label, onPress, first = false }: CellProps) {
-  const box = `flex min-h-[56px] flex-col justify-center text-left ${first ? "pr-4 tablet:border-l tablet:border-hair tablet:pl-5" : "border-l border-hair px-4"}`;
-  const title = <span className="text-[20px] leading-tight font-[680] whitespace-nowrap">{words}</span>;
+  const box = `flex min-h-[56px] flex-col justify-center text-left ${first ? "pr-4 max-[359px]:pr-2 tablet:border-l tablet:border-hair tablet:pl-5" : "border-l border-hair px-4 max-[359px]:px-2"}`;
+  const title = <span className="text-[20px] leading-tight font-[680] min-[360px]:whitespace-nowrap">{words}</span>;
   if (!onPress) return <div className={box}>{title}</div>;
   return (
     <button type="button" aria-label={label} onClick={onPress} className={box}>
@@ -89,7 +89,7 @@ function CheckOrChanged({ onCheck }: { onCheck: () => void }) {
     <button
       type="button"
       onClick={onCheck}
-      className={`${styles.check} min-h-[56px] w-[110px] rounded-[8px] px-3 text-left text-[16px] leading-tight font-[640] control`}
+      className={`${styles.check} min-h-[56px] w-[110px] rounded-[8px] px-3 text-left text-[16px] leading-tight font-[640] control max-[359px]:w-[98px] max-[359px]:px-2`}
     >
       Checked, unchanged
     </button>
