@@ -277,6 +277,11 @@ describe("a pause", () => {
     expect(dueAt("hold", judge("12:20", { facts: since, episode: { pauses } }))).toBe(moment("16:10"));
   });
 
+  it("F3 what falls due as a pause begins is due at its beginning", () => {
+    const late = [{ from: moment("22:00"), until: moment("23:00") }];
+    expect(metric("ph", "23:30", { facts, episode: { pauses: late } }).dueAt).toBe(moment("22:00"));
+  });
+
   it("F3 an interval leaves the pause out", () => {
     expect(metric("ph", "22:59", { facts, episode: { pauses } }).freshness).toBe("current");
     expect(metric("ph", "23:00", { facts, episode: { pauses } }).freshness).toBe("due");

@@ -33,6 +33,16 @@ describe("minute volume and total rate", () => {
     expect(metric(name, "10:10", total(22)).value).toBeNull();
   });
 
+  it("V7 a total rate that lapsed or that a change expired is unknown", () => {
+    const bedside = inMode(volumeControl, [fact("10:00", { respiratoryRateTotal: 30 })]);
+    expect(metric(name, "17:59", bedside).value).toBeNull();
+    expect(metric(name, "18:00", bedside).value).toBe(8.4);
+    const charted = [settings("08:00", volumeControl), settings("10:30", { tidalVolumeMl: 400 })];
+    const changed = inMode(volumeControl, [fact("10:00", { respiratoryRateTotal: 30 })], { settings: charted });
+    expect(metric(name, "10:29", changed).value).toBeNull();
+    expect(metric(name, "10:30", changed).value).toBe(8);
+  });
+
   it("V7 a measured one that a change expired gives way", () => {
     const charted = [settings("08:00", volumeControl), settings("10:30", { respiratoryRate: 24 })];
     const bedside = inMode(volumeControl, [fact("10:00", { minuteVolumeLPerMin: 9 })], { settings: charted });
