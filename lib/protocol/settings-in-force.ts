@@ -1,8 +1,8 @@
 import type { SettingField, VentilationMode } from "../physiology/modes";
 import type { Author, Instant, SettingsFact } from "./facts";
-import { isoOf, millisecondsOf } from "./instant";
+import { millisecondsOf } from "./instant";
 import { foldSettings, type Snapshot } from "./timeline/fold-settings";
-import { itemsInOrder, newestUntil, type Item } from "./timeline/item";
+import { itemsInOrder, newestUntil, writtenTimes, type Item } from "./timeline/item";
 
 /** A charted value with where it came from. Times are ISO 8601 in UTC. */
 export interface ValueInForce<Value> {
@@ -25,9 +25,8 @@ function snapshotsOf(changes: readonly SettingsFact[]): Snapshot[] {
   return snapshots;
 }
 
-function valueOf<Value>(value: Value, { fact, t }: Item<SettingsFact>): ValueInForce<Value> {
-  const recordedAt = isoOf(millisecondsOf(fact.recordedAt))!;
-  return { value, entryId: fact.id, chartedAt: isoOf(t)!, recordedAt, author: fact.author };
+function valueOf<Value>(value: Value, item: Item<SettingsFact>): ValueInForce<Value> {
+  return { value, entryId: item.fact.id, ...writtenTimes(item), author: item.fact.author };
 }
 
 /**

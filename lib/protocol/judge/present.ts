@@ -1,22 +1,14 @@
 import { isoOf } from "../instant";
 import type { Derived, DerivedInput } from "../result";
 import type { Scene } from "../scene";
-import { recordedAt } from "../timeline/item";
+import { writtenTimes } from "../timeline/item";
 import type { Judged } from "./judged";
 import type { Input } from "./reading";
 
 function presentInput({ name, value, unit, item }: Input): DerivedInput {
   if (!item) return { name, value, unit, entryId: null, chartedAt: null, recordedAt: null, author: null };
-  const { fact, t } = item;
-  return {
-    name,
-    value,
-    unit,
-    entryId: fact.id,
-    chartedAt: isoOf(t),
-    recordedAt: isoOf(recordedAt(item)),
-    author: fact.author,
-  };
+  const { chartedAt, recordedAt } = writtenTimes(item);
+  return { name, value, unit, entryId: item.fact.id, chartedAt, recordedAt, author: item.fact.author };
 }
 
 /** A judged metric in the answer's shape. `inputs` are those of the value, else of the last one. */
@@ -34,7 +26,7 @@ export function present(scene: Scene, judged: Judged): Derived {
     changedByEntryId: change?.entryId ?? null,
     changedBy: change?.by ?? null,
     dueAt: isoOf(judged.dueAt),
-    chartedAt: isoOf(shown?.t),
+    chartedAt: shown ? writtenTimes(shown.item).chartedAt : null,
     since: isoOf(judged.run?.since),
     limit: limit && { ...bounds(limit), origin: scene.targets.origin ?? "order" },
     ...(shown?.band === undefined ? {} : { band: shown.band }),

@@ -1,5 +1,5 @@
-import type { FactBase } from "../facts";
-import { millisecondsOf } from "../instant";
+import type { FactBase, Instant } from "../facts";
+import { isoOf, millisecondsOf } from "../instant";
 
 /** A fact with its `chartedAt` as milliseconds. */
 export interface Item<Fact extends FactBase = FactBase> {
@@ -13,6 +13,19 @@ export interface Item<Fact extends FactBase = FactBase> {
 export function recordedAt(item: Item): number {
   if (item.recorded === 0) item.recorded = millisecondsOf(item.fact.recordedAt);
   return item.recorded;
+}
+
+/** '2026-12-01T12:00:00.000Z': what is already so written need not be written again. */
+const isUtc = (instant: Instant): instant is string =>
+  typeof instant === "string" && instant.length === 24 && instant.endsWith("Z");
+
+/** `chartedAt` and `recordedAt` as ISO 8601 in UTC. */
+export function writtenTimes(item: Item): { chartedAt: string; recordedAt: string } {
+  const { fact, t } = item;
+  return {
+    chartedAt: isUtc(fact.chartedAt) ? fact.chartedAt : isoOf(t)!,
+    recordedAt: isUtc(fact.recordedAt) ? fact.recordedAt : isoOf(recordedAt(item))!,
+  };
 }
 
 const recordedOf = (fact: FactBase) => millisecondsOf(fact.place?.recordedAt ?? fact.recordedAt);
