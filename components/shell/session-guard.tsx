@@ -2,6 +2,7 @@
 
 import { useQueryClient } from "@tanstack/react-query";
 import { signOut } from "next-auth/react";
+import dynamic from "next/dynamic";
 import { Dialog } from "radix-ui";
 import type { ReactNode } from "react";
 import { useSessionWatch } from "@/lib/client/use-session-watch";
@@ -10,7 +11,9 @@ import { useUnlock } from "@/lib/client/use-unlock";
 import type { Me } from "@/lib/contracts";
 import { DoorFrame } from "./door-frame";
 import { LockPanel } from "./lock-panel";
-import { SignInPanel } from "./sign-in-panel";
+
+// Signing in needs the network anyway; its form is fetched when a session has ended. The lock's form never waits for one.
+const SignInPanel = dynamic(() => import("./sign-in-panel").then((part) => part.SignInPanel), { ssr: false });
 
 const leave = () => void signOut({ callbackUrl: "/sign-in" });
 

@@ -1,10 +1,10 @@
 "use client";
 
+import dynamic from "next/dynamic";
 import Link from "next/link";
 import { useState } from "react";
 import { VolumeLadder } from "@/components/figures/volume-ladder";
 import type { HistoryOf } from "@/components/history/history-of";
-import { HistorySheet } from "@/components/history/history-sheet";
 import type { Worksheet } from "@/lib/contracts";
 import { useServerNow } from "@/lib/client/server-clock";
 import { useWorksheet } from "@/lib/client/use-worksheet";
@@ -17,9 +17,14 @@ import { PatientStrip } from "./patient-strip";
 import { PhoneSummary } from "./phone-summary";
 import { SetColumn } from "./set-column";
 import { SpanPanel } from "./span-panel";
-import { WhereFrom } from "./where-from";
 import { WorksOutColumn } from "./works-out-column";
 import type { DerivedRow } from "./rows";
+
+// What opens over the sheet, and its dialog, is fetched when it is first opened.
+const HistorySheet = dynamic(() => import("@/components/history/history-sheet").then((part) => part.HistorySheet), {
+  ssr: false,
+});
+const WhereFrom = dynamic(() => import("./where-from").then((part) => part.WhereFrom), { ssr: false });
 
 /** One patient: what is set, what was measured, what it works out to, and what is due. */
 export function WorksheetScreen({ initial }: { initial: Worksheet }) {
@@ -60,8 +65,8 @@ export function WorksheetScreen({ initial }: { initial: Worksheet }) {
         <DueRail sheet={sheet} now={now} onHistory={setHistory} />
       </div>
       <EntryBar sheet={sheet} now={now} />
-      <HistorySheet sheet={sheet} of={history} onClose={() => setHistory(null)} />
-      <WhereFrom sheet={sheet} row={whereFrom} now={now} onClose={() => setWhereFrom(null)} />
+      {history && <HistorySheet sheet={sheet} of={history} onClose={() => setHistory(null)} />}
+      {whereFrom && <WhereFrom sheet={sheet} row={whereFrom} now={now} onClose={() => setWhereFrom(null)} />}
     </>
   );
 }

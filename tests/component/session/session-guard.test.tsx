@@ -122,7 +122,8 @@ describe("a page whose session ended", () => {
     show();
     await userEvent.type(screen.getByLabelText("Plateau"), "27");
     await lose("not-signed-in");
-    expect(screen.getByRole("heading", { name: "Your session has ended" })).toBeVisible();
+    const heading = { name: "Your session has ended" };
+    expect(await screen.findByRole("heading", heading, { timeout: 10_000 })).toBeVisible();
     expect(screen.getByDisplayValue("27")).toBeInTheDocument();
   });
 });

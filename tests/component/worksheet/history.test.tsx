@@ -28,7 +28,7 @@ function entry(overrides: Partial<Entry>): Entry {
 async function openHistory() {
   render(worksheetPage(judgedWorksheet(firstFacts)));
   await userEvent.click(screen.getByRole("button", { name: /history of Plateau/ }));
-  return screen.findByRole("dialog", { name: "History of Plateau" });
+  return screen.findByRole("dialog", { name: "History of Plateau" }, { timeout: 10_000 });
 }
 
 describe("the history of a value", () => {

@@ -113,7 +113,7 @@ describe("the worksheet", () => {
   it("opens where a number comes from: sum, inputs with time and author, source", async () => {
     render(worksheetPage(judgedWorksheet(firstFacts)));
     await userEvent.click(cell("Works out to", "Driving pressure"));
-    const panel = screen.getByRole("dialog", { name: "Driving pressure: where from" });
+    const panel = await screen.findByRole("dialog", { name: "Driving pressure: where from" }, { timeout: 10_000 });
     expect(panel).toHaveTextContent("24 − 10 = 14 cmH2O");
     expect(panel).toHaveTextContent("Plateau 24 cmH2O");
     expect(panel).toHaveTextContent("Tue 1 Dec 10:30Mara Okafor");
