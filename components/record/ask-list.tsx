@@ -32,7 +32,7 @@ export function AskList({ wanted }: { wanted: number }) {
             <Subscripted text={question} />
           </p>
           <Button size="entry" onClick={() => answer(key, true)}>
-            {yes}
+            <Subscripted text={yes} />
           </Button>
           {no && (
             <Button size="entry" onClick={() => answer(key, false)}>

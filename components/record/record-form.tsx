@@ -114,12 +114,12 @@ function StillSending({ screen }: { screen: RecordScreenState }) {
 
 function BedMoved({ screen }: { screen: RecordScreenState }) {
   const { worksheet } = useRecord();
-  if (!screen.movedBed) return null;
-  const { from, to } = screen.movedBed;
+  const { moved, accept } = screen.bed;
+  if (!moved) return null;
   return (
-    <Notice action={<Button onClick={screen.acceptBed}>Still this patient</Button>}>
-      {worksheet.patient.name} is in {to === "no bed" ? to : `bed ${to}`} now, was in{" "}
-      {from === "another bed" ? from : `bed ${from}`} when this form was opened.
+    <Notice action={<Button onClick={accept}>Still this patient</Button>}>
+      {worksheet.patient.name} is in {moved.to === null ? "no bed" : `bed ${moved.to}`} now, was in{" "}
+      {moved.from === null ? "another bed" : `bed ${moved.from}`} when this form was opened.
     </Notice>
   );
 }
@@ -131,6 +131,6 @@ function useHindrance(screen: RecordScreenState): string | null {
     const at = timeOfDay({ at: pending.filled.chartedAt, timeZone: worksheet.unit.timeZone });
     return `The entry of ${at} is still being sent: save this one when it has arrived.`;
   }
-  if (screen.movedBed) return "The bed changed: say above that it is still this patient.";
+  if (screen.bed.moved) return "The bed changed: say above that it is still this patient.";
   return timeRefusal({ at: editing.filled.chartedAt, now, intubatedAt: worksheet.episode.intubatedAt });
 }

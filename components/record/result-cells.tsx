@@ -3,22 +3,15 @@
 import { DeltaP } from "@/components/figures/delta";
 import { timeOfDay } from "@/lib/format";
 import { ResultCell } from "./result-cell";
-import { resultWords } from "./result-words";
+import { toldResults } from "./told-results";
 import { useRecord } from "./use-record";
 import styles from "./record.module.css";
 
 /** mL/kg and driving pressure, worked out while a person types. */
 export function ResultCells() {
-  const { live, worksheet, mode } = useRecord();
-  const { timeZone } = worksheet.unit;
-  const volume = resultWords(live.volume, {
-    unit: "mL/kg",
-    decimals: 1,
-    timeZone,
-    needs: worksheet.pbwKg === null ? "needs height" : "needs exhaled volume",
-  });
-  const driving = resultWords(live.driving, { unit: "cmH2O", decimals: 0, timeZone, needs: "needs plateau" });
-  const shown = live.ifRelaxed && driving.number !== null ? { ...driving, unit: "if relaxed" } : driving;
+  const record = useRecord();
+  const { volume, driving } = toldResults(record);
+  const shown = record.live.ifRelaxed && driving.number !== null ? { ...driving, unit: "if relaxed" } : driving;
   return (
     <div
       className={`${styles.cells} flex items-stretch gap-3 py-1.5 tablet:gap-6`}
@@ -30,7 +23,7 @@ export function ResultCells() {
         <ResultCell
           name="Driving pressure"
           before={<DeltaP className="text-[18px] font-[640]" />}
-          words={mode ? shown : { ...shown, aside: null }}
+          words={record.mode ? shown : { ...shown, aside: null }}
         />
         <HoldTime />
       </div>

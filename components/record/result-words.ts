@@ -20,6 +20,8 @@ interface Told {
   timeZone: string;
   /** What is missing where nothing was ever worked out. */
   needs: string;
+  /** Beside 'not asked': why. */
+  whyNotAsked: string | null;
 }
 
 function written(value: number, derived: Derived, decimals: number): string {
@@ -32,8 +34,8 @@ function written(value: number, derived: Derived, decimals: number): string {
   });
 }
 
-function asideOf(derived: Derived, { timeZone, needs }: Told): string | null {
-  if (derived.state === "not-asked") return "spontaneous";
+function asideOf(derived: Derived, { timeZone, needs, whyNotAsked }: Told): string | null {
+  if (derived.state === "not-asked") return whyNotAsked;
   const { freshness, changedAt, notes } = derived;
   if (freshness === "changed-since" && changedAt) return `since ${timeOfDay({ at: changedAt, timeZone })}`;
   if (freshness === "lapsed") return "too long ago";

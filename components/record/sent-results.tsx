@@ -5,20 +5,15 @@ import { RangeTrack } from "@/components/figures/range-track";
 import { StateWord } from "@/components/figures/state-word";
 import { Subscripted } from "@/components/figures/subscripted";
 import type { Derived } from "@/lib/contracts";
-import { resultWords, type ResultWords } from "./result-words";
+import type { ResultWords } from "./result-words";
+import { toldResults } from "./told-results";
 import { useRecord } from "./use-record";
 
 /** What the entry works out to, each on its own range. */
 export function SentResults() {
-  const { live, worksheet } = useRecord();
-  const { timeZone } = worksheet.unit;
-  const volume = resultWords(live.volume, {
-    unit: "mL/kg",
-    decimals: 1,
-    timeZone,
-    needs: "needs height or exhaled volume",
-  });
-  const driving = resultWords(live.driving, { unit: "cmH2O", decimals: 0, timeZone, needs: "needs plateau" });
+  const record = useRecord();
+  const { live } = record;
+  const { volume, driving } = toldResults(record);
   return (
     <div className="mt-6 flex max-w-[760px] gap-4">
       <Result name="Volume per kg" metric="vtMlPerKg" derived={live.volume} words={volume} />

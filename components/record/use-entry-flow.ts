@@ -1,7 +1,7 @@
 "use client";
 
 import { useRef, useState } from "react";
-import { AppError, type ChartAnswer, type FieldConflict } from "@/lib/contracts";
+import type { ChartAnswer } from "@/lib/contracts";
 import { newClientKey } from "@/lib/client/new-client-key";
 import { useChartEntry } from "@/lib/client/use-chart-entry";
 import { useVoidSubmission } from "@/lib/client/use-void-submission";
@@ -83,7 +83,3 @@ export function useEntryFlow({ patientId, onSaved, onRefused }: EntryFlowInput):
 }
 
 const undoReason = "Undo: entered by mistake";
-
-export function conflictOf(error: Error): FieldConflict[] {
-  return error instanceof AppError ? (error.conflict ?? []) : [];
-}
