@@ -11,6 +11,7 @@ import {
   type MechanicsNumber,
   type ObservationNumber,
 } from "./form-fields";
+import { focusHoldWord } from "./hold-focus";
 import { holdWords } from "./hold-words";
 import type { TypingTarget } from "./typing";
 import { useRecord } from "./use-record";
@@ -51,6 +52,7 @@ export function EntryKeypad() {
   function choose(hold: string) {
     editing.set("hold", holdQualities.find((each) => each === hold) ?? null);
     typing.close();
+    focusHoldWord();
   }
 }
 
@@ -60,7 +62,7 @@ function labelOf({ part, field }: TypingTarget): string {
   return observationStyles[field as ObservationNumber].label;
 }
 
-const zones = "[data-keypad-zone], input, [role=group], [data-record-foot]";
+const zones = "[data-keypad-zone], [data-record-foot], [data-field] :is(input, button, [role=spinbutton])";
 
 /**
  * There is no OK key: a touch on anything that is not typed into closes the keypad. Where it began counts, not where it

@@ -6,6 +6,7 @@ import { Subscripted } from "@/components/figures/subscripted";
 import { shownNumber } from "./drafted-settings";
 import { FieldRow } from "./field-row";
 import { mechanicsStyles, observationStyles, type MechanicsNumber, type ObservationNumber } from "./form-fields";
+import { focusHoldWords } from "./hold-focus";
 import { holdWords } from "./hold-words";
 import { refusalKey } from "./refusals";
 import { sameTarget, targetName, type TypingTarget } from "./typing";
@@ -23,8 +24,12 @@ export function MeasuredRow(target: MeasuredRowProps) {
   const isTyping = sameTarget(typing.target, target);
   const { hold } = editing.values;
   const isPlateau = target.field === "plateauCmH2O";
+  const openWords = () => {
+    typing.open(target);
+    focusHoldWords();
+  };
   const word = isPlateau
-    ? { text: hold ? holdWords[hold] : "hold?", chosen: hold !== null, onOpen: () => typing.open(target) }
+    ? { text: hold ? holdWords[hold] : "hold?", chosen: hold !== null, onOpen: openWords }
     : undefined;
   const error =
     readiness.refusals[refusalKey(target.part, target.field)] ??

@@ -57,10 +57,12 @@ describe("the commonest entry", () => {
     const { user } = renderRecord();
     screen.getByRole("spinbutton", { name: "PEEP" }).focus();
     await user.keyboard("{ArrowUp}{ArrowUp}");
-    await user.click(screen.getByRole("textbox", { name: "Plateau" }));
-    await user.keyboard("27");
-    await user.click(button("relaxed"));
+    screen.getByRole("textbox", { name: "Plateau" }).focus();
+    await user.keyboard("27{Tab}{Enter}");
+    await waitFor(() => expect(button("relaxed")).toHaveFocus());
+    await user.keyboard("{Enter}");
     expect(within(result("Driving pressure")).getByText("15")).toBeVisible();
+    await waitFor(() => expect(button("Plateau, how the hold was: relaxed")).toHaveFocus());
   });
 
   it("says 'if relaxed' and keeps Save from saving until the hold has its word", async () => {
