@@ -74,10 +74,7 @@ function databaseNamed(name: string): TestDatabase {
     name,
     ownerUrl: inDatabase(address("TEST_DATABASE_ADMIN_URL"), name),
     appUrl: inDatabase(address("TEST_DATABASE_APP_URL"), name),
-    drop: () =>
-      asAdministrator(async (client) => {
-        await client.query(`DROP DATABASE IF EXISTS "${name}" WITH (FORCE)`);
-      }),
+    drop: () => asAdministrator((client) => dropDatabase(client, name)),
   };
 }
 
@@ -111,5 +108,22 @@ export async function withClient<Result>(url: string, run: (client: pg.Client) =
     return await run(client);
   } finally {
     await client.end();
+  }
+}
+
+const INSUFFICIENT_PRIVILEGE = "42501";
+const dropTries = 50;
+
+/** The owner may not end PostgreSQL's own autovacuum worker, which may be at work in there: it leaves by itself. */
+async function dropDatabase(client: pg.Client, name: string): Promise<void> {
+  for (let attempt = 1; ; attempt += 1) {
+    try {
+      await client.query(`DROP DATABASE IF EXISTS "${name}" WITH (FORCE)`);
+      return;
+    } catch (error) {
+      const busy = (error as { code?: string }).code === INSUFFICIENT_PRIVILEGE;
+      if (!busy || attempt === dropTries) throw error;
+      await new Promise((done) => setTimeout(done, 200));
+    }
   }
 }
