@@ -19,7 +19,7 @@ export function ResultCells() {
       aria-atomic="true"
     >
       <ResultCell name="Volume per kg" words={volume} />
-      <div className="flex min-w-0 items-start gap-3 border-l border-hair pl-3 tablet:pl-6">
+      <div className="flex min-w-0 items-start gap-2 border-l border-hair pl-2 tablet:pl-6">
         <ResultCell
           name="Driving pressure"
           before={<DeltaP className="text-[18px] font-[640]" />}
