@@ -22,7 +22,10 @@ export function PatientHeader({ worksheet, onHeight, children }: PatientHeaderPr
   const { patient, episode } = worksheet;
   return (
     <header className={styles.strip}>
-      <div className={`${styles.identity} flex min-h-[60px] items-center gap-3 px-4 py-1.5 tablet:px-6 desk:px-8`}>
+      <div
+        data-record-head
+        className={`${styles.identity} flex min-h-[60px] items-center gap-3 px-4 py-1.5 tablet:px-6 desk:px-8`}
+      >
         <Link
           href={`/patients/${patient.id}`}
           aria-label="Back to the worksheet"
