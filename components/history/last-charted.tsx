@@ -1,7 +1,7 @@
 import { Subscripted } from "@/components/figures/subscripted";
 import type { EntryKind, Worksheet } from "@/lib/contracts";
 import { useEntries } from "@/lib/client/use-entries";
-import { timeOfDay } from "@/lib/format";
+import { clockTime } from "@/lib/format";
 import { entryWords } from "./entry-words";
 import type { HistoryOf } from "./history-of";
 
@@ -34,7 +34,7 @@ export function LastCharted({ sheet, onHistory }: { sheet: Worksheet; onHistory:
               onClick={() => onHistory({ label: kindLabels[entry.kind], kind: entry.kind })}
             >
               <span className="block t-label text-muted">
-                {timeOfDay({ at: entry.chartedAt, timeZone: sheet.unit.timeZone })}, {entry.author.name}
+                {clockTime({ at: entry.chartedAt, now: sheet.at, timeZone: sheet.unit.timeZone })}, {entry.author.name}
               </span>
               <span className={`block t-small ${entry.supersededById ? "text-muted line-through" : ""}`}>
                 <Subscripted text={entryWords(entry)} />

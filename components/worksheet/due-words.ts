@@ -1,4 +1,4 @@
-import { timeOfDay } from "@/lib/format";
+import { clockTime } from "@/lib/format";
 import type { Worksheet } from "@/lib/contracts";
 
 type DueThing = Worksheet["due"][number];
@@ -16,7 +16,7 @@ const shortNames: Partial<typeof names> = { hold: "Hold", gas: "Gas" };
 
 /** 'Hold for plateau due 23:10', 'SpO2 due since 22:50'. */
 export function dueSentence(due: DueThing, now: number, timeZone: string, short = false): string {
-  const time = timeOfDay({ at: due.dueAt, timeZone });
+  const time = clockTime({ at: due.dueAt, now, timeZone });
   const name = (short && shortNames[due.what]) || names[due.what];
   return Date.parse(due.dueAt) <= now ? `${name} due since ${time}` : `${name} due ${time}`;
 }

@@ -1,6 +1,6 @@
 import type { FreshnessProps } from "@/components/figures/freshness";
 import type { Derived } from "@/lib/contracts";
-import { durationText, timeOfDay } from "@/lib/format";
+import { clockTime, durationText } from "@/lib/format";
 
 /** What time and change have done to a reading; of a judged number or of a measured field alike. */
 export type Reading = Pick<Derived, "freshness" | "changedAt" | "changedBy" | "dueAt" | "chartedAt">;
@@ -19,7 +19,7 @@ export function freshnessOf(
     freshness,
     changedBy: changeWords[changedBy ?? "settings"],
     ...(needs !== undefined && { needs }),
-    ...(sinceAt && { since: timeOfDay({ at: sinceAt, timeZone: clock.timeZone }) }),
+    ...(sinceAt && { since: clockTime({ at: sinceAt, ...clock }) }),
     ...(chartedAt && { age: durationText({ minutes: (clock.now - Date.parse(chartedAt)) / 60_000 }) }),
   };
 }
@@ -27,8 +27,8 @@ export function freshnessOf(
 /** 'HH:MM' of a value that was last outside and is not measured since (it stays told until a fresh one is inside). */
 export function lastOutsideTime(
   { value, lastState, chartedAt }: Pick<Derived, "value" | "lastState" | "chartedAt">,
-  timeZone: string,
+  clock: { now: number; timeZone: string },
 ): string | undefined {
   if (value !== null || lastState !== "outside" || chartedAt === null) return undefined;
-  return timeOfDay({ at: chartedAt, timeZone });
+  return clockTime({ at: chartedAt, ...clock });
 }

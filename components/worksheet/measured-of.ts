@@ -1,7 +1,7 @@
 import { trackDomains, type TrackMetric } from "@/components/figures/track-domain";
 import type { Derived, Value, Worksheet } from "@/lib/contracts";
 import type { FreshnessProps } from "@/components/figures/freshness";
-import { displayNumber, timeOfDay } from "@/lib/format";
+import { clockTime, displayNumber } from "@/lib/format";
 import { freshnessOf, lastOutsideTime, type Reading } from "./freshness-of";
 import { whyUnmeasured } from "./note-words";
 import type { MeasuredRow } from "./rows";
@@ -40,14 +40,14 @@ export function measuredOf(sheet: Worksheet, row: MeasuredRow, now: number): Mea
   const write = (number: number) =>
     displayNumber({ value: number, decimals: decimalsOf(number, row.decimals), limit: limits });
   const at = derived?.chartedAt ?? charted?.chartedAt ?? null;
-  const lastAt = at === null ? null : timeOfDay({ at, timeZone });
+  const lastAt = at === null ? null : clockTime({ at, now, timeZone });
   return {
     label: row.field === "plateauCmH2O" ? (holdLabels[String(sheet.mechanics?.hold?.value)] ?? row.label) : row.label,
     text: value === null ? null : write(value),
     freshness: freshnessOf(reading, { now, timeZone }),
     was: value === null && last !== null && lastAt !== null ? `was ${write(last)} at ${lastAt}` : null,
     everCharted: charted !== undefined || last !== null,
-    lastOutsideAt: (derived && lastOutsideTime(derived, timeZone)) ?? null,
+    lastOutsideAt: (derived && lastOutsideTime(derived, { now, timeZone })) ?? null,
     notAsked: derived?.state === "not-asked",
     note: derived && derived.value === null && isFresh(derived) ? whyUnmeasured(derived.notes) : null,
     judged:

@@ -19,7 +19,7 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
     <div className="pt-3 tablet:hidden">
       <div className="flex flex-wrap items-baseline gap-x-3">
         <Result value={volume?.value ?? null} decimals={1} unit={volume?.unit ?? "mL/kg"} limit={volume?.limit} />
-        <PhoneState derived={volume} timeZone={sheet.unit.timeZone} />
+        <PhoneState derived={volume} clock={{ now, timeZone: sheet.unit.timeZone }} />
         {ordered && (
           <span className="t-label text-muted">
             {volume?.limit?.origin === "order" ? "ordered" : "default"} {ordered}
@@ -32,7 +32,7 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
         <div className="min-w-[130px] flex-1">
           <p className="t-label text-muted">Driving pressure</p>
           <Result value={driving?.value ?? null} decimals={0} unit="cmH2O" limit={driving?.limit} />
-          <PhoneState derived={driving} timeZone={sheet.unit.timeZone} />
+          <PhoneState derived={driving} clock={{ now, timeZone: sheet.unit.timeZone }} />
           <OrderWords sheet={sheet} />
         </div>
       </div>
@@ -40,9 +40,9 @@ export function PhoneSummary({ sheet, now }: { sheet: Worksheet; now: number }) 
   );
 }
 
-function PhoneState({ derived, timeZone }: { derived: Derived | undefined; timeZone: string }) {
+function PhoneState({ derived, clock }: { derived: Derived | undefined; clock: { now: number; timeZone: string } }) {
   if (!derived) return null;
-  const lastOutsideAt = lastOutsideTime(derived, timeZone);
+  const lastOutsideAt = lastOutsideTime(derived, clock);
   return <StateWord state={derived.state} shape {...(lastOutsideAt && { lastOutsideAt })} />;
 }
 

@@ -1,6 +1,6 @@
 import type { HistoryOf } from "@/components/history/history-of";
 import type { Worksheet } from "@/lib/contracts";
-import { displayNumber, timeOfDay } from "@/lib/format";
+import { clockTime, displayNumber, timeOfDay } from "@/lib/format";
 import { modeLabel, ventilationModes, type VentilationMode } from "@/lib/physiology";
 import { ColumnHead } from "./column-head";
 import { settingRows } from "./rows";
@@ -70,7 +70,7 @@ function settingsStand(sheet: Worksheet): string {
   const newest = Object.values(sheet.settings)
     .map(({ chartedAt }) => Date.parse(chartedAt))
     .reduce((a, b) => Math.max(a, b));
-  return `${modeLabel(mode)}, ${timeOfDay({ at: newest, timeZone: sheet.unit.timeZone })}`;
+  return `${modeLabel(mode)}, ${clockTime({ at: newest, now: sheet.at, timeZone: sheet.unit.timeZone })}`;
 }
 
 function flowLabel(field: string, label: string, { settings }: Worksheet): string {

@@ -1,6 +1,6 @@
 import type { LowWater, PressureSpanProps, SpanReading } from "@/components/figures/span-reading";
 import type { Derived, Worksheet } from "@/lib/contracts";
-import { durationText, timeOfDay } from "@/lib/format";
+import { clockTime, durationText } from "@/lib/format";
 
 /** Beds knows no single readings: there the peak is not drawn. */
 type Sheet = Pick<Worksheet, "settings" | "derived"> & {
@@ -63,7 +63,6 @@ function supportOf(sheet: Sheet): SpanReading {
 }
 
 function holdOf(sheet: Sheet, plateau: Derived | undefined, driving: Derived | undefined, now: number): SpanReading {
-  const peak = inputOf(plateau, "peakCmH2O") ?? numberOf(sheet.mechanics, "peakCmH2O");
   if (plateau?.value != null && driving?.value != null) {
     const minutes = plateau.chartedAt ? (now - Date.parse(plateau.chartedAt)) / 60_000 : 0;
     return {
@@ -72,7 +71,7 @@ function holdOf(sheet: Sheet, plateau: Derived | undefined, driving: Derived | u
       driving: driving.value,
       plateauState: plateau.state,
       drivingState: driving.state,
-      peak: peakOfSameHold(sheet, plateau) ?? null,
+      peak: peakOfSameHold(sheet, plateau),
       age: durationText({ minutes }),
     };
   }
@@ -86,8 +85,8 @@ function holdOf(sheet: Sheet, plateau: Derived | undefined, driving: Derived | u
     plateau: plateau.lastValue,
     basePeep: base ?? plateau.lastValue - (driving?.lastValue ?? 0),
     driving: driving?.lastValue ?? null,
-    peak: peakOfSameHold(sheet, plateau) ?? peak,
-    at: timeOfDay({ at: plateau.chartedAt, timeZone: sheet.unit.timeZone }),
+    peak: peakOfSameHold(sheet, plateau),
+    at: clockTime({ at: plateau.chartedAt, now, timeZone: sheet.unit.timeZone }),
     lastOutside: plateau.lastState === "outside" || driving?.lastState === "outside",
   };
 }

@@ -2,7 +2,7 @@ import { Freshness } from "@/components/figures/freshness";
 import { StateWord } from "@/components/figures/state-word";
 import { trackDomains, type TrackMetric } from "@/components/figures/track-domain";
 import type { Derived, Worksheet } from "@/lib/contracts";
-import { displayNumber, timeOfDay } from "@/lib/format";
+import { clockTime, displayNumber } from "@/lib/format";
 import { arithmeticOf } from "./arithmetic";
 import { ColumnHead } from "./column-head";
 import { freshnessOf, lastOutsideTime } from "./freshness-of";
@@ -52,7 +52,7 @@ interface DerivedCellProps {
 
 function DerivedCell({ row, derived, clock, pbwKg, onOpen }: DerivedCellProps) {
   const { value, state } = derived;
-  const aside = value === null ? lastWords(row, derived, clock.timeZone) : howWords(row, derived, pbwKg);
+  const aside = value === null ? lastWords(row, derived, clock) : howWords(row, derived, pbwKg);
   return (
     <SheetCell label={row.label} aside={aside} onOpen={onOpen} opens={`where ${row.label} comes from`}>
       {value === null ? (
@@ -86,15 +86,15 @@ export function writeDerived(row: DerivedRow, { limit }: Derived, value: number)
   return displayNumber({ value, decimals: row.decimals, limit: limits });
 }
 
-function lastWords(row: DerivedRow, derived: Derived, timeZone: string): string {
+function lastWords(row: DerivedRow, derived: Derived, clock: DerivedCellProps["clock"]): string {
   if (derived.lastValue === null || !derived.chartedAt) return "";
   const last = writeDerived(row, derived, derived.lastValue);
-  return `was ${last} at ${timeOfDay({ at: derived.chartedAt, timeZone })}`;
+  return `was ${last} at ${clockTime({ at: derived.chartedAt, ...clock })}`;
 }
 
 function Unmeasured({ row, derived, clock }: Pick<DerivedCellProps, "row" | "derived" | "clock">) {
   if (derived.state === "not-asked") return <span className="t-body text-muted">not asked</span>;
-  const lastOutsideAt = lastOutsideTime(derived, clock.timeZone);
+  const lastOutsideAt = lastOutsideTime(derived, clock);
   if (lastOutsideAt) return <StateWord state="unmeasured" lastOutsideAt={lastOutsideAt} />;
   const stale = derived.freshness === "changed-since" || derived.freshness === "lapsed";
   const why = stale ? null : (whyUnmeasured(derived.notes) ?? (derived.freshness === "missing" ? null : row.needs));

@@ -1,5 +1,6 @@
 export { ageText } from "./age-text";
 export { calendarDate } from "./calendar-date";
+export { clockTime } from "./clock-time";
 export { cmFromFeetInches } from "./cm-from-feet-inches";
 export { dayAndDate } from "./day-and-date";
 export { displayNumber } from "./display-number";
